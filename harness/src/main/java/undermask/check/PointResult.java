@@ -1,0 +1,21 @@
+package undermask.check;
+
+import java.util.List;
+import undermask.drive.OperatingPoint;
+import undermask.mask.Judgement;
+import undermask.pwm.Bridge;
+import undermask.receiver.Trace;
+
+/**
+ * One operating point, checked.
+ *
+ * @param bridge the switching that was computed
+ * @param trace what the receiver shows, the worse line of the mains
+ * @param judgements worst frequency of each detector that the mask limits
+ */
+public record PointResult(OperatingPoint point, Bridge bridge, Trace trace, List<Judgement> judgements) {
+    /** Takes a copy of the judgements. */
+    public PointResult {
+        judgements = List.copyOf(judgements);
+    }
+}

@@ -1,0 +1,44 @@
+package undermask.installation;
+
+import java.util.Objects;
+
+/**
+ * A motor of the catalogue as common mode sees it: a small capacitance at the terminals, the rest at the star point
+ * behind the winding.
+ *
+ * @param name as installations name it
+ * @param ratedPower shaft power in W
+ * @param terminalCapacitance winding to frame at the terminals, per phase, in F
+ * @param starCapacitance residual winding-to-frame capacitance at the star point in F
+ * @param windingInductance common-mode inductance of the three windings together in H
+ * @param windingResistance in parallel to it, ohm
+ * @param frameResistance in series with the terminal capacitances together, ohm (lamination and frame)
+ * @param source where the values come from
+ */
+public record MotorPart(
+        String name,
+        double ratedPower,
+        double terminalCapacitance,
+        double starCapacitance,
+        double windingInductance,
+        double windingResistance,
+        double frameResistance,
+        String source) {
+    /** Builds a part of positive, finite values. */
+    public MotorPart {
+        Objects.requireNonNull(name);
+        Objects.requireNonNull(source);
+        for (double value : new double[] {
+            ratedPower, terminalCapacitance, starCapacitance, windingInductance, windingResistance, frameResistance
+        }) {
+            if (!(value > 0) || Double.isInfinite(value)) {
+                throw new IllegalArgumentException("motor " + name + " has a value of " + value);
+            }
+        }
+    }
+
+    /** Winding-to-frame capacitance of all phases at low frequency, F. */
+    public double totalCapacitance() {
+        return 3 * terminalCapacitance + starCapacitance;
+    }
+}

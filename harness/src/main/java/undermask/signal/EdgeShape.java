@@ -1,0 +1,25 @@
+package undermask.signal;
+
+/**
+ * The shape of a step between two levels. Each shape is placed so that its centre of gravity in time is the instant of
+ * the edge; the shape then changes no volt-seconds and no low harmonic.
+ */
+public sealed interface EdgeShape permits IdealEdge, RampEdge, RaisedCosineEdge, ExponentialEdge {
+    /**
+     * The spectrum factor E(f), the Fourier transform of the edge's derivative, 1 at f = 0.
+     *
+     * @param frequency in Hz
+     * @param out receives real and imaginary part in its first two places
+     */
+    void factor(double frequency, double[] out);
+
+    /**
+     * The edge in time: 0 long before, 1 long after.
+     *
+     * @param time from the instant of the edge, s
+     */
+    double response(double time);
+
+    /** Transition time between the rails in s: ΔV divided by dv/dt. */
+    double transitionTime();
+}

@@ -1,0 +1,13 @@
+package undermask.signal;
+
+public record ExponentialEdge(double transitionTime) implements EdgeShape {
+    @Override
+    public void factor(double frequency, double[] out) {
+        throw new UnsupportedOperationException();
+    }
+
+    @Override
+    public double response(double time) {
+        throw new UnsupportedOperationException();
+    }
+}

@@ -1,0 +1,63 @@
+package undermask.unit;
+
+import java.math.BigDecimal;
+import java.math.MathContext;
+import java.math.RoundingMode;
+import java.util.Locale;
+
+/** Numbers as text, rounded once and independent of the locale. */
+public final class Figures {
+    private Figures() {}
+
+    /**
+     * A number with its unit and a fitting SI prefix: {@code 4 kHz}, {@code 2.5 kV/us}, {@code 470 µF}.
+     *
+     * @param value in SI
+     * @param digits significant digits, at least 1; trailing zeros are left out
+     */
+    public static String withUnit(double value, Dimension dimension, int digits) {
+        if (!Double.isFinite(value)) {
+            return Double.toString(value) + " " + dimension.siSymbol();
+        }
+        return switch (dimension) {
+            case NUMBER -> significant(value, digits);
+            case TEMPERATURE -> significant(value, digits) + " degC";
+            case DECIBEL, LEVEL -> significant(value, digits) + " " + dimension.siSymbol();
+            case SLEW -> significant(value * 1e-9, digits) + " kV/us";
+            default -> {
+                Prefix prefix = Prefix.fitting(value);
+                // 999.97 rounds to 1000: ask again with the rounded value
+                double rounded = value == 0 ? 0 : round(value / prefix.value, digits) * prefix.value;
+                prefix = Prefix.fitting(rounded);
+                yield significant(value / prefix.value, digits) + " " + prefix.symbol + dimension.siSymbol();
+            }
+        };
+    }
+
+    /** A number with so many significant digits and no exponent: {@code 0.00125}, {@code 4000}. */
+    public static String significant(double value, int digits) {
+        if (!Double.isFinite(value)) {
+            return Double.toString(value);
+        }
+        if (value == 0) {
+            return "0";
+        }
+        return new BigDecimal(value)
+                .round(new MathContext(digits, RoundingMode.HALF_EVEN))
+                .stripTrailingZeros()
+                .toPlainString();
+    }
+
+    /** A number with a fixed count of decimals, never {@code -0.0}: {@code 12.3}. */
+    public static String fixed(double value, int decimals) {
+        String text = String.format(Locale.ROOT, "%." + decimals + "f", value);
+        boolean zero = text.chars().allMatch(c -> c == '-' || c == '0' || c == '.');
+        return zero && text.startsWith("-") ? text.substring(1) : text;
+    }
+
+    private static double round(double value, int digits) {
+        return new BigDecimal(value)
+                .round(new MathContext(digits, RoundingMode.HALF_EVEN))
+                .doubleValue();
+    }
+}
