@@ -15,7 +15,7 @@ public final class TabulatedTransfer implements Transfer {
     private static final double WIDEST_RATIO = Math.sqrt(2);
     /** An interval of this share of its frequency is taken as it is: only a resonance without losses asks for less. */
     private static final double NARROWEST = 1e-6;
-    /** Halving an interval lessens the error of a polynomial of the fourth degree 32 times in the end; this is relied on. */
+    /** Halving an interval lessens the error of a polynomial of the fourth degree 32 times in the end; so much is relied on. */
     private static final double GAIN_OF_HALVING = 4;
 
     private static final int COEFFICIENTS = 5;

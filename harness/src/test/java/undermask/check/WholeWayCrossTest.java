@@ -56,8 +56,12 @@ class WholeWayCrossTest {
 
     private static final double TOLERANCE_OF_LEAD = 1e-5;
 
-    /** An evaporator fan of 0.75 kW on single-phase mains. */
     private static Installation installation() {
+        return installation(new CablePart("lead of low loss", 380e-12, 135e-9, 1e-3, 1e6, 1e-5, "generic"));
+    }
+
+    /** An evaporator fan of 0.75 kW on single-phase mains. */
+    static Installation installation(CablePart lead) {
         return new Installation(
                 "evaporator fan",
                 new Supply(1, 230, 50),
@@ -77,7 +81,7 @@ class WholeWayCrossTest {
                 0.1,
                 new Link(new Capacitor(470e-6, 150e-3, 40e-9), new Capacitor(4.7e-9, 100e-3, 0)),
                 80e-12,
-                new CablePart("lead of low loss", 380e-12, 135e-9, 1e-3, 1e6, 1e-5, "generic"),
+                lead,
                 5,
                 new MotorPart("motor of 0.75 kW", 750, 111e-12, 996e-12, 3.14e-3, 2270, 11.5, "generic"),
                 OptionalDouble.of(1e-6));
