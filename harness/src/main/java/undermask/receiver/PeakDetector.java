@@ -11,10 +11,10 @@ import java.util.Arrays;
  */
 final class PeakDetector {
     /** Squares below this share of the highest cannot hide the peak next to them. */
-    private static final double CANDIDATE = 0.7;
+    private static final double CANDIDATE = 0.8;
 
     /** By how much, in squares, a parabola through samples may miss the peak between them. */
-    private static final double PARABOLA_DOUBT = 1.1;
+    private static final double PARABOLA_DOUBT = 1.05;
 
     /** A parabola that rises less than this above its middle sample is believed; its error is 0.001 dB. */
     private static final double FLAT = 1.001;
@@ -88,40 +88,48 @@ final class PeakDetector {
      */
     double[] read(LaneTransform envelope, double[] squares, int width) {
         double[][] highest = highestOfBlocks(squares, envelope.samples(), width);
-        double[] overall = new double[width];
+        double[] best = new double[width];
         for (double[] block : highest) {
-            for (int lane = 0; lane < width; lane++) {
-                overall[lane] = Math.max(overall[lane], block[lane]);
-            }
+            raise(best, block);
         }
-        double[] peaks = new double[width];
+        double[] threshold = new double[width];
         for (int lane = 0; lane < width; lane++) {
-            double best = overall[lane];
-            double threshold = CANDIDATE * best;
-            for (int block = 0; block < highest.length; block++) {
-                if (highest[block][lane] >= threshold) {
-                    best = search(envelope, squares, width, lane, block * BLOCK, threshold, best);
+            threshold[lane] = CANDIDATE * best[lane];
+        }
+        // lanes inside blocks: neighbours peak at the same time, and their samples share lines of the cache
+        for (int block = 0; block < highest.length; block++) {
+            for (int lane = 0; lane < width; lane++) {
+                if (highest[block][lane] >= threshold[lane]) {
+                    best[lane] = search(envelope, squares, width, lane, block * BLOCK, threshold[lane], best[lane]);
                 }
             }
-            peaks[lane] = Math.sqrt(best);
         }
-        return peaks;
+        for (int lane = 0; lane < width; lane++) {
+            best[lane] = Math.sqrt(best[lane]);
+        }
+        return best;
     }
 
     private static double[][] highestOfBlocks(double[] squares, int samples, int width) {
-        double[][] highest = new double[samples / BLOCK][width];
+        double[][] highest = new double[samples / BLOCK][];
         double[] row = new double[width];
-        for (int n = 0; n < samples; n++) {
-            System.arraycopy(squares, n * width, row, 0, width);
-            raise(highest[n / BLOCK], row);
+        double[] top = new double[width];
+        int n = 0;
+        for (int block = 0; block < highest.length; block++) {
+            Arrays.fill(top, 0);
+            for (int i = 0; i < BLOCK; i++, n++) {
+                System.arraycopy(squares, n * width, row, 0, width);
+                raise(top, row);
+            }
+            highest[block] = top.clone();
         }
         return highest;
     }
 
-    private static void raise(double[] highest, double[] row) {
-        for (int lane = 0; lane < highest.length; lane++) {
-            double more = row[lane] - highest[lane];
-            highest[lane] += 0.5 * (more + Math.abs(more));
+    private static void raise(double[] top, double[] row) {
+        for (int lane = 0; lane < row.length; lane++) {
+            double more = row[lane] - top[lane];
+            top[lane] += 0.5 * (more + Math.abs(more));
         }
     }
 
