@@ -135,12 +135,12 @@ final class PeakDetector {
 
     private double search(
             LaneTransform envelope, double[] squares, int width, int lane, int from, double threshold, double highest) {
-        int mask = envelope.samples() - 1;
+        int samples = envelope.samples();
         double best = highest;
-        double before = squares[((from - 1) & mask) * width + lane];
+        double before = squares[wrapped(from - 1, samples) * width + lane];
         double middle = squares[from * width + lane];
         for (int n = from; n < from + BLOCK; n++) {
-            double after = squares[((n + 1) & mask) * width + lane];
+            double after = squares[wrapped(n + 1, samples) * width + lane];
             if (middle >= threshold && middle >= before && middle > after) {
                 double top = middle + (after - before) * (after - before) / (8 * (2 * middle - before - after));
                 if (top * PARABOLA_DOUBT > best) {
@@ -168,20 +168,26 @@ final class PeakDetector {
         double left = Math.log(before / middle);
         double right = Math.log(after / middle);
         double bend = left + right;
-        return bend < 0 ? middle * Math.exp((right - left) * (right - left) / (-8 * bend)) : middle;
+        return bend < 0 && bend > Double.NEGATIVE_INFINITY
+                ? middle * Math.exp((right - left) * (right - left) / (-8 * bend))
+                : middle;
     }
 
     /** Square of the envelope midway between a sample and the next. */
     private double midway(LaneTransform envelope, int lane, int sample) {
-        int mask = envelope.samples() - 1;
+        int samples = envelope.samples();
         double re = 0;
         double im = 0;
         for (int i = 0; i < HALF_TAPS; i++) {
-            int early = (sample - i) & mask;
-            int late = (sample + 1 + i) & mask;
+            int early = wrapped(sample - i, samples);
+            int late = wrapped(sample + 1 + i, samples);
             re += taps[i] * (envelope.re(early)[lane] + envelope.re(late)[lane]);
             im += taps[i] * (envelope.im(early)[lane] + envelope.im(late)[lane]);
         }
         return re * re + im * im;
+    }
+
+    private static int wrapped(int sample, int samples) {
+        return sample < 0 ? sample + samples : sample < samples ? sample : sample - samples;
     }
 }

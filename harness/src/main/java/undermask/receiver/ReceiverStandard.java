@@ -11,16 +11,18 @@ public enum ReceiverStandard implements Worded {
     MIL_STD_461("mil-std-461", Band.MIL_LOW, Band.MIL_HIGH);
 
     private final String words;
-    private final List<Band> bands;
+    private final Band low;
+    private final Band high;
 
-    ReceiverStandard(String words, Band... bands) {
+    ReceiverStandard(String words, Band low, Band high) {
         this.words = words;
-        this.bands = List.of(bands);
+        this.low = low;
+        this.high = high;
     }
 
-    /** The bands from low to high, each beginning where the last one ends. */
+    /** The bands from low to high, the second beginning where the first ends. */
     public List<Band> bands() {
-        return bands;
+        return List.of(low, high);
     }
 
     @Override

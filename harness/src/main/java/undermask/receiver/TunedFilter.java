@@ -42,13 +42,15 @@ final class TunedFilter {
         Arrays.fill(offsets, Double.NaN);
     }
 
-    /** Samples of the envelope per window, a power of two. */
+    /** Samples of the envelope per window, 2^k or 3·2^k. */
     int samples() {
+        double least = DENSITY * response.sigma() / spacing;
         int samples = FEWEST_SAMPLES;
-        while (samples < DENSITY * response.sigma() / spacing) {
+        while (samples < least) {
             samples = Math.multiplyExact(samples, 2);
         }
-        return samples;
+        int fewer = samples / 4 * 3;
+        return fewer >= Math.max(least, FEWEST_SAMPLES) ? fewer : samples;
     }
 
     int lowestLine(double frequency) {
@@ -94,10 +96,10 @@ final class TunedFilter {
         }
         double[] re = window.re();
         double[] im = window.im();
-        int mask = transform.samples() - 1;
         for (int m = -reach; m <= reach; m++) {
-            double[] rowRe = transform.inputRe(m & mask);
-            double[] rowIm = transform.inputIm(m & mask);
+            int index = m < 0 ? m + transform.samples() : m;
+            double[] rowRe = transform.inputRe(index);
+            double[] rowIm = transform.inputIm(index);
             int weightAt = (reach + m) * GROUP;
             int shift = m - window.first();
             for (int lane = 0; lane < count; lane++) {
