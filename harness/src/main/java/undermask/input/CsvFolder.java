@@ -29,7 +29,10 @@ final class CsvFolder {
         try (DirectoryStream<Path> entries = Files.newDirectoryStream(folder)) {
             for (Path entry : entries) {
                 if (isCsv(entry) && !Files.isDirectory(entry)) {
-                    files.put(name(entry), entry);
+                    Path same = files.put(name(entry), entry);
+                    if (same != null) {
+                        problems.add(Place.of(folder.toString()), "two files are named " + name(entry) + ENDING);
+                    }
                 }
             }
         } catch (IOException | DirectoryIteratorException e) {
@@ -45,7 +48,7 @@ final class CsvFolder {
 
     /** The name of a file without its ending. */
     static String name(Path file) {
-        String name = file.getFileName().toString();
+        String name = file.getFileName() == null ? "" : file.getFileName().toString();
         return isCsv(file) ? name.substring(0, name.length() - ENDING.length()) : name;
     }
 }

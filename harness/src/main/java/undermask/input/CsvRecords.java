@@ -14,6 +14,14 @@ import org.apache.commons.csv.CSVRecord;
  */
 final class CsvRecords {
     private static final char QUOTE = '"';
+    private static final CSVFormat COMMAS = CSVFormat.Builder.create()
+            .setDelimiter(',')
+            .setQuote(QUOTE)
+            .setIgnoreSurroundingSpaces(true)
+            .setIgnoreEmptyLines(false)
+            .get();
+    private static final CSVFormat SEMICOLONS =
+            CSVFormat.Builder.create(COMMAS).setDelimiter(';').get();
 
     private CsvRecords() {}
 
@@ -26,16 +34,14 @@ final class CsvRecords {
      */
     record Line(List<Cell> cells, char separator, boolean whole) {}
 
-    /** A cell's span in the text: from the first character, the quote included, to the separator or the line's end. */
-    private record Span(int from, int to) {}
-
     /**
-     * The spans of a record.
+     * Where the cells of a record stand.
      *
+     * @param starts offset of the first character of each, the quote of a quoted one
      * @param end offset of the line feed that ends it, or the end of the text
      * @param fault offset of a quote that is never closed as it should be, or -1
      */
-    private record Spans(List<Span> cells, int end, int fault) {}
+    private record Spans(List<Integer> starts, int end, int fault) {}
 
     /** All records; the first one, which is the header, tells the separator. */
     static List<Line> of(SourceText source, Problems problems) {
@@ -58,11 +64,13 @@ final class CsvRecords {
             if (spans.fault() >= 0) {
                 // what follows may be sound: give up this line alone
                 end = source.lineEnd(spans.fault());
+                String mark = separator == ',' ? "comma" : "semicolon";
                 problems.add(
                         source.place(spans.fault()),
                         text.substring(spans.fault(), end),
-                        "the quotes of this cell do not close (further lines of a cell may hold no "
-                                + (separator == ',' ? "comma" : "semicolon") + ")");
+                        "the quotes around this cell must close right before the next " + mark
+                                + " or the line's end, a quote inside is doubled; a cell of several lines may hold no "
+                                + mark + " after its first");
                 lines.add(new Line(List.of(firstCell(source, from, lineEnd, separator)), separator, false));
             } else {
                 end = spans.end();
@@ -93,35 +101,36 @@ final class CsvRecords {
     }
 
     private static Spans spans(String text, int recordStart, char separator) {
-        List<Span> cells = new ArrayList<>();
+        List<Integer> starts = new ArrayList<>();
         int i = recordStart;
         while (true) {
-            while (i < text.length() && Character.isWhitespace(text.charAt(i)) && text.charAt(i) != '\n') {
-                i++;
-            }
+            i = afterSpaces(text, i);
             int from = i;
             if (i < text.length() && text.charAt(i) == QUOTE) {
-                i = afterClosingQuote(text, from, separator);
-                while (i >= 0
-                        && i < text.length()
-                        && Character.isWhitespace(text.charAt(i))
-                        && text.charAt(i) != '\n') {
-                    i++;
-                }
+                int closed = afterClosingQuote(text, from, separator);
+                i = closed < 0 ? closed : afterSpaces(text, closed);
                 if (i < 0 || i < text.length() && text.charAt(i) != separator && text.charAt(i) != '\n') {
-                    return new Spans(cells, -1, from);
+                    return new Spans(starts, -1, from);
                 }
             } else {
                 while (i < text.length() && text.charAt(i) != separator && text.charAt(i) != '\n') {
                     i++;
                 }
             }
-            cells.add(new Span(from, i));
+            starts.add(from);
             if (i >= text.length() || text.charAt(i) == '\n') {
-                return new Spans(cells, i, -1);
+                return new Spans(starts, i, -1);
             }
             i++;
         }
+    }
+
+    private static int afterSpaces(String text, int from) {
+        int i = from;
+        while (i < text.length() && Character.isWhitespace(text.charAt(i)) && text.charAt(i) != '\n') {
+            i++;
+        }
+        return i;
     }
 
     /**
@@ -144,25 +153,18 @@ final class CsvRecords {
 
     private static List<Cell> cells(SourceText source, int from, Spans spans, char separator) {
         CSVRecord values = parse(source.text().substring(from, spans.end()), separator);
-        if (values.size() != spans.cells().size()) {
+        if (values.size() != spans.starts().size()) {
             throw new IllegalStateException("a record of " + source.file() + " was taken apart in two ways");
         }
         List<Cell> cells = new ArrayList<>();
         for (int i = 0; i < values.size(); i++) {
-            cells.add(new Cell(
-                    strip(values.get(i)), source.place(spans.cells().get(i).from())));
+            cells.add(new Cell(strip(values.get(i)), source.place(spans.starts().get(i))));
         }
         return cells;
     }
 
     private static CSVRecord parse(String text, char separator) {
-        CSVFormat format = CSVFormat.Builder.create()
-                .setDelimiter(separator)
-                .setQuote(QUOTE)
-                .setIgnoreSurroundingSpaces(true)
-                .setIgnoreEmptyLines(false)
-                .get();
-        try (CSVParser parser = CSVParser.parse(text, format)) {
+        try (CSVParser parser = CSVParser.parse(text, separator == ',' ? COMMAS : SEMICOLONS)) {
             return parser.iterator().next();
         } catch (IOException e) {
             throw new UncheckedIOException(e);

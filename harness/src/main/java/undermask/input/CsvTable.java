@@ -20,9 +20,9 @@ final class CsvTable {
      *
      * @param needed columns that the header must have
      * @param optional columns that may follow them
-     * @param mayEnd how many cells at the end of a row may be left out altogether
+     * @param least how many cells a row must have; the rest may be left out at its end
      */
-    record Columns(List<String> needed, List<String> optional, int mayEnd) {
+    record Columns(List<String> needed, List<String> optional, int least) {
         private boolean match(List<String> header) {
             if (header.size() < needed.size()
                     || !header.subList(0, needed.size()).equals(needed)) {
@@ -86,13 +86,13 @@ final class CsvTable {
         }
         List<Row> rows = new ArrayList<>();
         for (CsvRecords.Line line : lines.subList(1, lines.size())) {
-            boolean whole = line.whole() && fits(line, header, columns.mayEnd(), problems);
+            boolean whole = line.whole() && fits(line, header, columns.least(), problems);
             rows.add(new Row(List.copyOf(header), line.cells(), whole));
         }
         return Optional.of(new CsvTable(source.file(), rows));
     }
 
-    private static boolean fits(CsvRecords.Line line, List<String> header, int mayEnd, Problems problems) {
+    private static boolean fits(CsvRecords.Line line, List<String> header, int least, Problems problems) {
         List<Cell> cells = line.cells();
         for (Cell extra : cells.subList(Math.min(header.size(), cells.size()), cells.size())) {
             if (!extra.empty()) {
@@ -104,7 +104,7 @@ final class CsvTable {
                 return false;
             }
         }
-        if (cells.size() < header.size() - mayEnd) {
+        if (cells.size() < least) {
             problems.add(
                     cells.get(0),
                     "the row has " + cells.size() + (cells.size() == 1 ? " cell" : " cells") + ", wanted are "

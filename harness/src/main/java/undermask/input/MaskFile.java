@@ -18,7 +18,7 @@ import undermask.unit.Worded;
 /** Reads the limit table of a mask: one row per stretch of a limit line, frequencies in Hz, limits in dBµV. */
 final class MaskFile {
     private static final CsvTable.Columns COLUMNS = new CsvTable.Columns(
-            List.of("detector", "from_hz", "to_hz", "from_dbuv", "to_dbuv"), List.of("receiver", "network"), 2);
+            List.of("detector", "from_hz", "to_hz", "from_dbuv", "to_dbuv"), List.of("receiver", "network"), 5);
     private static final Range FROM = named("from_hz", LimitSegment.FREQUENCY);
     private static final Range TO = named("to_hz", LimitSegment.FREQUENCY);
     private static final Range FROM_LEVEL = named("from_dbuv", LimitSegment.LEVEL);

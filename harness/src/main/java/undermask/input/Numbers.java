@@ -65,7 +65,7 @@ final class Numbers {
             return number(number, unit, range);
         }
         Matcher glued = WITH_UNIT.matcher(cell.text());
-        if (range.dimension() != Dimension.NUMBER && glued.matches()) {
+        if (range.dimension() != Dimension.NUMBER && !isDecimal(cell) && glued.matches()) {
             problems.add(cell, "one space goes between number and unit: " + glued.group(1) + " " + glued.group(2));
             return OptionalDouble.empty();
         }
@@ -82,8 +82,7 @@ final class Numbers {
             problems.add(cell, range.quantity() + " needs a value from " + range.text());
             return OptionalDouble.empty();
         }
-        Matcher carriesUnit = WITH_UNIT.matcher(cell.text());
-        if (carriesUnit.matches()) {
+        if (!isDecimal(cell) && WITH_UNIT.matcher(cell.text()).matches()) {
             problems.add(
                     cell,
                     range.quantity() + " is written as a number without unit, in "
@@ -112,9 +111,13 @@ final class Numbers {
         return inside;
     }
 
+    private static boolean isDecimal(Cell cell) {
+        return DECIMAL.matcher(cell.text()).matches();
+    }
+
     private Optional<BigDecimal> decimal(Cell written, Range range) {
         String text = written.text();
-        if (DECIMAL.matcher(text).matches()) {
+        if (isDecimal(written)) {
             return Optional.of(new BigDecimal(text));
         }
         if (DECIMAL_COMMA.matcher(text).matches()) {
@@ -143,21 +146,23 @@ final class Numbers {
             return Optional.of(new BigDecimal(factor.get()).round(FACTOR_DIGITS));
         }
         Optional<Dimension> read = Dimension.of(unit.text());
+        boolean digits = unit.text().chars().allMatch(c -> c >= '0' && c <= '9');
         if (unit.empty()) {
             problems.add(
                     unit.place(),
                     written.text(),
                     range.quantity() + " needs a unit of " + wanted.words() + ": " + wanted.examples());
+        } else if (digits) {
+            problems.add(
+                    unit,
+                    "not a unit; a number takes a decimal point, no comma: " + written.text() + "." + unit.text());
+        } else if (wanted == Dimension.NUMBER) {
+            problems.add(unit, range.quantity() + " is a pure number; the unit is left empty or is %");
         } else if (read.filter(dimension -> dimension != Dimension.NUMBER).isPresent()) {
             problems.add(
                     unit,
                     "a unit of " + read.get().words() + "; " + range.quantity() + " takes a unit of " + wanted.words()
                             + ": " + wanted.examples());
-        } else if (unit.text().chars().allMatch(c -> c >= '0' && c <= '9')) {
-            problems.add(
-                    unit,
-                    "not a unit of " + wanted.words() + "; a number takes a decimal point, no comma: " + written.text()
-                            + "." + unit.text());
         } else {
             problems.add(
                     unit, "not a unit of " + wanted.words() + "; " + range.quantity() + " takes " + wanted.examples());

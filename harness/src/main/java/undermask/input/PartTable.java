@@ -1,6 +1,5 @@
 package undermask.input;
 
-import java.util.Collection;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -37,7 +36,8 @@ final class PartTable<T> {
 
     /** Takes the parts of a file; a name that is there already is overridden. */
     void add(SourceText source, List<String> columns, Maker<T> maker) {
-        Optional<CsvTable> table = CsvTable.read(source, new CsvTable.Columns(columns, List.of(), 0), problems);
+        Optional<CsvTable> table =
+                CsvTable.read(source, new CsvTable.Columns(columns, List.of(), columns.size()), problems);
         Map<String, Cell> names = new LinkedHashMap<>();
         for (CsvTable.Row row : table.map(CsvTable::rows).orElse(List.of())) {
             Cell name = row.first();
@@ -64,10 +64,5 @@ final class PartTable<T> {
             return Optional.empty();
         }
         return part;
-    }
-
-    /** All parts that are right, sorted by name. */
-    Collection<T> all() {
-        return parts.values().stream().flatMap(Optional::stream).toList();
     }
 }

@@ -125,13 +125,15 @@ public final class ProfileFolder {
         if (known.containsKey(profile)) {
             return Optional.of(known.get(profile));
         }
+        String name = profile;
         try {
             Path path = Path.of(profile);
+            name = CsvFolder.name(path);
             if (Files.exists(path) && (CsvFolder.isCsv(path) || !Files.isRegularFile(path))) {
                 return Optional.of(path);
             }
-            if (path.getNameCount() == 1 && known.containsKey(CsvFolder.name(path))) {
-                return Optional.of(known.get(CsvFolder.name(path)));
+            if (path.getNameCount() == 1 && known.containsKey(name)) {
+                return Optional.of(known.get(name));
             }
         } catch (InvalidPathException e) {
             // no file can have that name: the same message as for one that does not exist
@@ -142,7 +144,7 @@ public final class ProfileFolder {
         problems.add(
                 Place.of(profile),
                 "no such profile: neither a name nor the path of a file that ends in .csv"
-                        + NearestName.hint(profile, known.keySet(), listed));
+                        + NearestName.hint(name, known.keySet(), listed));
         return Optional.empty();
     }
 

@@ -1,9 +1,10 @@
 package undermask.input;
 
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
-import java.util.TreeMap;
+import java.util.Set;
 import undermask.mask.Mask;
 
 /**
@@ -15,44 +16,52 @@ import undermask.mask.Mask;
  */
 final class PublishedMasks {
     private static final String FOLDER = "/undermask/input/masks/";
-    private static final CsvTable.Columns INDEX =
-            new CsvTable.Columns(List.of("name", "title", "source", "evidence"), List.of(), 0);
+    private static final CsvTable.Columns COLUMNS =
+            new CsvTable.Columns(List.of("name", "title", "source", "evidence"), List.of(), 4);
+    private static final Map<String, CsvTable.Row> INDEX = index();
 
     private PublishedMasks() {}
 
-    /**
-     * All of them by name.
-     *
-     * @throws IllegalStateException when a built-in table is not right
-     */
-    static Map<String, Mask> all() {
-        return Holder.MASKS;
-    }
-
-    private static final class Holder {
-        private static final Map<String, Mask> MASKS = read();
-    }
-
-    private static Map<String, Mask> read() {
+    private static Map<String, CsvTable.Row> index() {
         Problems faults = new Problems();
-        Map<String, Mask> masks = new TreeMap<>();
-        List<CsvTable.Row> index = SourceText.builtIn(FOLDER + "index.csv", faults)
-                .flatMap(text -> CsvTable.read(text, INDEX, faults))
+        List<CsvTable.Row> rows = SourceText.builtIn(FOLDER + "index.csv", faults)
+                .flatMap(text -> CsvTable.read(text, COLUMNS, faults))
                 .map(CsvTable::rows)
                 .orElse(List.of());
-        for (CsvTable.Row row : index) {
-            String name = row.cell("name").text();
-            String source =
-                    row.cell("source").text() + " (" + row.cell("evidence").text() + ")";
-            Optional<Mask> mask = SourceText.builtIn(FOLDER + name + ".csv", faults)
-                    .flatMap(text -> MaskFile.read(text, name, row.cell("title").text(), source, faults));
-            if (mask.isPresent() && masks.put(name, mask.get()) != null) {
+        Map<String, CsvTable.Row> index = new LinkedHashMap<>();
+        for (CsvTable.Row row : rows) {
+            if (index.put(row.first().text(), row) != null) {
                 faults.add(row.first(), "given twice");
             }
         }
-        if (!faults.none() || masks.isEmpty()) {
+        expectNone(faults);
+        return index;
+    }
+
+    /** The names of all of them, sorted as in the index. */
+    static Set<String> names() {
+        return INDEX.keySet();
+    }
+
+    /**
+     * Reads one of them.
+     *
+     * @param name one of {@link #names}
+     * @throws IllegalStateException when the built-in table is not right
+     */
+    static Mask read(String name) {
+        CsvTable.Row row = INDEX.get(name);
+        String source = row.cell("source").text() + " (" + row.cell("evidence").text() + ")";
+        Problems faults = new Problems();
+        Optional<Mask> mask = SourceText.builtIn(FOLDER + name + ".csv", faults)
+                .flatMap(text -> MaskFile.read(text, name, row.cell("title").text(), source, faults));
+        expectNone(faults);
+        return mask.orElseThrow();
+    }
+
+    private static void expectNone(Problems faults) {
+        if (!faults.none()) {
             throw new IllegalStateException("built-in masks are not right: " + faults.sorted());
         }
-        return Map.copyOf(masks);
     }
 }

@@ -25,7 +25,7 @@ import undermask.unit.Worded;
  */
 final class QuantityTable {
     private static final CsvTable.Columns COLUMNS =
-            new CsvTable.Columns(List.of("quantity", "value", "unit", "note"), List.of(), 1);
+            new CsvTable.Columns(List.of("quantity", "value", "unit", "note"), List.of(), 3);
 
     private final String file;
     private final String about;
@@ -223,9 +223,14 @@ final class QuantityTable {
         problems.add(cell, wanted);
     }
 
-    /** The value of a quantity as written; the file as a whole when it is not given. */
+    /** The value of a quantity as written, with its unit; the file as a whole when it is not given. */
     Cell written(String quantity) {
-        return has(quantity) ? rows.get(quantity).cell("value") : new Cell(quantity, Place.of(file));
+        if (!has(quantity)) {
+            return new Cell(quantity, Place.of(file));
+        }
+        Cell value = rows.get(quantity).cell("value");
+        String unit = rows.get(quantity).cell("unit").text();
+        return new Cell((value.text() + " " + unit).strip(), value.place());
     }
 
     /** Where the value of each quantity stands. */

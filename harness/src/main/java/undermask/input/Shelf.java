@@ -6,8 +6,9 @@ import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.Set;
 import java.util.TreeMap;
-import java.util.stream.Stream;
+import java.util.TreeSet;
 import undermask.check.Policy;
 import undermask.installation.Installation;
 import undermask.mask.Mask;
@@ -25,7 +26,7 @@ final class Shelf {
     /** Empty for a file that is wrong: its problems are told once. */
     private final Map<String, Optional<Installation>> installations = new HashMap<>();
 
-    private final Map<String, Optional<Mask>> masks = new TreeMap<>();
+    private final Map<String, Optional<Mask>> masks = new HashMap<>();
     private Parts parts;
     private Optional<Policy> policy;
 
@@ -39,9 +40,8 @@ final class Shelf {
         this.problems = problems;
         this.installationFiles = list(INSTALLATIONS);
         this.maskFiles = list(MASKS);
-        PublishedMasks.all().forEach((name, mask) -> masks.put(name, Optional.of(mask)));
         maskFiles.forEach((name, file) -> {
-            if (masks.containsKey(name)) {
+            if (PublishedMasks.names().contains(name)) {
                 problems.add(
                         Place.of(file.toString()),
                         name,
@@ -87,33 +87,44 @@ final class Shelf {
         if (!isFileName(name, MASKS)) {
             return Optional.empty();
         }
-        readMask(name.text());
-        Optional<Mask> mask = masks.get(name.text());
-        if (mask == null) {
-            List<String> names = Stream.concat(masks.keySet().stream(), maskFiles.keySet().stream())
-                    .toList();
+        Set<String> known = maskNames();
+        if (!known.contains(name.text())) {
             problems.add(
                     name,
-                    "no such mask" + NearestName.hint(name.text(), names, "the command \"masks\" lists what is known"));
+                    "no such mask" + NearestName.hint(name.text(), known, "the command \"masks\" lists what is known"));
             return Optional.empty();
         }
-        return mask;
+        return readMask(name.text());
     }
 
     /** Every mask that is right, sorted by name. */
     List<Mask> allMasks() {
-        maskFiles.keySet().forEach(this::readMask);
-        return masks.values().stream().flatMap(Optional::stream).toList();
+        return maskNames().stream()
+                .map(this::readMask)
+                .flatMap(Optional::stream)
+                .toList();
     }
 
-    private void readMask(String name) {
-        if (maskFiles.containsKey(name) && !masks.containsKey(name)) {
-            Path file = maskFiles.get(name);
+    private Set<String> maskNames() {
+        Set<String> names = new TreeSet<>(PublishedMasks.names());
+        names.addAll(maskFiles.keySet());
+        return names;
+    }
+
+    private Optional<Mask> readMask(String name) {
+        if (!masks.containsKey(name)) {
             masks.put(
                     name,
-                    SourceText.read(file, problems)
-                            .flatMap(text -> MaskFile.read(text, name, "own mask", file.toString(), problems)));
+                    PublishedMasks.names().contains(name)
+                            ? Optional.of(PublishedMasks.read(name))
+                            : readOwnMask(name, maskFiles.get(name)));
         }
+        return masks.get(name);
+    }
+
+    private Optional<Mask> readOwnMask(String name, Path file) {
+        return SourceText.read(file, problems)
+                .flatMap(text -> MaskFile.read(text, name, "own mask", file.toString(), problems));
     }
 
     /** The policy of the first folder that has one; empty when it is wrong. */
