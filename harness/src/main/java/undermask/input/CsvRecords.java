@@ -109,7 +109,7 @@ final class CsvRecords {
             if (i < text.length() && text.charAt(i) == QUOTE) {
                 int closed = afterClosingQuote(text, from, separator);
                 i = closed < 0 ? closed : afterSpaces(text, closed);
-                if (i < 0 || i < text.length() && text.charAt(i) != separator && text.charAt(i) != '\n') {
+                if (i < 0 || (i < text.length() && text.charAt(i) != separator && text.charAt(i) != '\n')) {
                     return new Spans(starts, -1, from);
                 }
             } else {
