@@ -3,6 +3,7 @@ package undermask.drive;
 import java.util.Objects;
 import java.util.OptionalDouble;
 import undermask.unit.Dimension;
+import undermask.unit.Figures;
 import undermask.unit.Range;
 
 /**
@@ -46,7 +47,8 @@ public record DriveSettings(
         Objects.requireNonNull(voltageCurve);
         linkVoltage.ifPresent(LINK_VOLTAGE::check);
         if (deadTime > 0.25 / carrierHz) {
-            throw new IllegalArgumentException("dead time is longer than a quarter of the carrier period");
+            throw new IllegalArgumentException("dead time must not exceed a quarter of the carrier period, "
+                    + Figures.withUnit(0.25 / carrierHz, Dimension.TIME, 4));
         }
     }
 }

@@ -8,44 +8,51 @@ import java.util.Optional;
  * The physical dimensions of this trade, each with the unit symbols that files may use and the SI unit in which the
  * program computes.
  *
- * <p>Symbols are case sensitive, as in the SI. Prefixes p, n, u (or µ), m, k, M and G may precede a symbol that takes
+ * <p>Symbols are case sensitive, as in the SI; {@code Ω} is read as {@code ohm}. Prefixes p, n, u (or µ), m, k, M and G may precede a symbol that takes
  * prefixes.
  */
 public enum Dimension {
-    /** A pure number; files leave the unit column empty or write {@code 1} or {@code %}. */
-    NUMBER("", plain("1"), scaled("%", 0.01)),
-    FREQUENCY("Hz", prefixed("Hz")),
-    TIME("s", prefixed("s"), scaled("min", 60), scaled("h", 3600)),
-    VOLTAGE("V", prefixed("V")),
-    CURRENT("A", prefixed("A")),
-    POWER("W", prefixed("W")),
-    RESISTANCE("ohm", prefixed("ohm"), prefixed("Ω")),
-    CAPACITANCE("F", prefixed("F")),
-    INDUCTANCE("H", prefixed("H")),
-    LENGTH("m", prefixed("m"), scaled("cm", 0.01)),
+    /** A pure number; files leave the unit column empty or write {@code %}. */
+    NUMBER("", "none or %", scaled("%", 0.01)),
+    FREQUENCY("Hz", "Hz, kHz or MHz", prefixed("Hz")),
+    TIME("s", "ns, us, ms or s", prefixed("s"), scaled("min", 60), scaled("h", 3600)),
+    VOLTAGE("V", "V or kV", prefixed("V")),
+    CURRENT("A", "mA or A", prefixed("A")),
+    POWER("W", "W or kW", prefixed("W")),
+    RESISTANCE("ohm", "mohm, ohm or kohm", prefixed("ohm")),
+    CAPACITANCE("F", "pF, nF or uF", prefixed("F")),
+    INDUCTANCE("H", "nH, uH or mH", prefixed("H")),
+    LENGTH("m", "mm, cm or m", prefixed("m"), scaled("cm", 0.01)),
     /** Voltage slew rate; files use {@code kV/us} or {@code V/ns}. */
-    SLEW("V/s", ratio("V", "s")),
-    CAPACITANCE_PER_LENGTH("F/m", ratio("F", "m")),
-    INDUCTANCE_PER_LENGTH("H/m", ratio("H", "m")),
-    RESISTANCE_PER_LENGTH("ohm/m", ratio("ohm", "m")),
+    SLEW("V/s", "kV/us or V/ns", ratio("V", "s")),
+    CAPACITANCE_PER_LENGTH("F/m", "pF/m or nF/m", ratio("F", "m")),
+    INDUCTANCE_PER_LENGTH("H/m", "nH/m or uH/m", ratio("H", "m")),
+    RESISTANCE_PER_LENGTH("ohm/m", "mohm/m or ohm/m", ratio("ohm", "m")),
     /** Degrees Celsius, a scale and not an interval; computed in degrees Celsius. */
-    TEMPERATURE("degC", plain("degC"), plain("°C")),
+    TEMPERATURE("degC", "degC", plain("degC"), plain("°C")),
     /** A ratio of levels. */
-    DECIBEL("dB", plain("dB")),
+    DECIBEL("dB", "dB", plain("dB")),
     /** A level referred to 1 µV rms. */
-    LEVEL("dBuV", plain("dBuV"), plain("dBµV"));
+    LEVEL("dBuV", "dBuV", plain("dBuV"), plain("dBµV"));
 
     private final String si;
+    private final String examples;
     private final List<Symbol> symbols;
 
-    Dimension(String si, Symbol... symbols) {
+    Dimension(String si, String examples, Symbol... symbols) {
         this.si = si;
+        this.examples = examples;
         this.symbols = List.of(symbols);
     }
 
     /** The symbol of the unit in which the program computes, empty for a pure number. */
     public String siSymbol() {
         return si;
+    }
+
+    /** The units that files mostly use for it, in words: {@code Hz, kHz or MHz}. */
+    public String examples() {
+        return examples;
     }
 
     /**
@@ -58,7 +65,8 @@ public enum Dimension {
         if (this == NUMBER && symbol.isEmpty()) {
             return Optional.of(1.0);
         }
-        String wanted = symbol.replace('μ', 'µ');
+        // Greek mu and micro sign, Greek omega and ohm sign look alike in an editor
+        String wanted = symbol.replace('\u03bc', 'µ').replace("\u03a9", "ohm").replace("\u2126", "ohm");
         return symbols.stream()
                 .map(candidate -> candidate.factor(wanted))
                 .flatMap(Optional::stream)

@@ -1,0 +1,36 @@
+package undermask.input;
+
+import java.util.Optional;
+import undermask.check.Policy;
+
+/** Reads the quantities of a policy, from a file of their own or from a profile that overrides some of them. */
+final class PolicyFile {
+    /** What holds where no file says anything. */
+    static final Policy DEFAULT = new Policy(6, false);
+
+    private PolicyFile() {}
+
+    /** Reads {@code policy.csv}; empty when anything is wrong. */
+    static Optional<Policy> read(SourceText source, Problems problems) {
+        return QuantityTable.read(source, "a policy", problems).flatMap(rows -> {
+            Optional<Policy> policy = read(rows, Optional.of(DEFAULT));
+            rows.rejectUnknown();
+            return policy;
+        });
+    }
+
+    /**
+     * Reads the rows that are given.
+     *
+     * @param otherwise holds where they are not; empty when it could not be read
+     */
+    static Optional<Policy> read(QuantityTable rows, Optional<Policy> otherwise) {
+        Policy base = otherwise.orElse(DEFAULT);
+        Optional<Policy> policy = rows.record(
+                Policy.REQUIRED_MARGIN.quantity(),
+                () -> new Policy(
+                        rows.number(Policy.REQUIRED_MARGIN, base.requiredMarginDb()),
+                        rows.yes("tight passes", base.tightPasses())));
+        return otherwise.isPresent() ? policy : Optional.empty();
+    }
+}

@@ -1,0 +1,109 @@
+package undermask.input;
+
+import java.util.ArrayList;
+import java.util.HashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import undermask.check.Policy;
+import undermask.check.Profile;
+import undermask.drive.CarrierSampling;
+import undermask.drive.DriveSettings;
+import undermask.drive.EdgeForm;
+import undermask.drive.Modulation;
+import undermask.drive.OperatingPoint;
+import undermask.drive.VoltageCurve;
+import undermask.installation.Installation;
+import undermask.mask.Mask;
+import undermask.unit.Place;
+import undermask.unit.Range;
+
+/** Reads the quantity file of a profile. */
+final class ProfileFile {
+    private ProfileFile() {}
+
+    /**
+     * Reads a profile and everything that it names.
+     *
+     * @param name of the profile
+     * @param shelf where installation, mask and policy are looked up
+     * @return empty when anything is wrong, which the problems say
+     */
+    static Optional<Profile> read(SourceText source, String name, Shelf shelf, Problems problems) {
+        Optional<QuantityTable> table = QuantityTable.read(source, "a profile", problems);
+        if (table.isEmpty()) {
+            return Optional.empty();
+        }
+        QuantityTable rows = table.get();
+        Optional<DriveSettings> settings = settings(rows);
+        List<OperatingPoint> points = points(rows);
+        Optional<Installation> installation = rows.word(
+                        "installation", "must name a file of the folder " + Shelf.INSTALLATIONS)
+                .flatMap(shelf::installation);
+        Optional<Mask> mask = rows.word("mask", "must name a published mask or a file of the folder " + Shelf.MASKS)
+                .flatMap(shelf::mask);
+        Optional<Policy> policy = PolicyFile.read(rows, shelf.policy());
+        rows.rejectUnknown();
+        if (settings.isEmpty() || points.isEmpty() || installation.isEmpty() || mask.isEmpty() || policy.isEmpty()) {
+            return Optional.empty();
+        }
+        Map<String, Place> places = new HashMap<>(rows.places());
+        places.put(Profile.FILE, Place.of(source.file()));
+        return Optional.of(
+                new Profile(name, settings.get(), points, installation.get(), mask.get(), policy.get(), places));
+    }
+
+    private static Optional<DriveSettings> settings(QuantityTable rows) {
+        Optional<VoltageCurve> curve = rows.record(
+                VoltageCurve.BOOST.quantity(),
+                () -> new VoltageCurve(
+                        rows.number(VoltageCurve.BASE_VOLTAGE),
+                        rows.number(VoltageCurve.BASE_FREQUENCY),
+                        rows.number(VoltageCurve.BOOST, 0)));
+        return rows.record(DriveSettings.DEAD_TIME.quantity(), () -> {
+            double rising = rows.number(DriveSettings.SLEW_RISING);
+            return new DriveSettings(
+                    rows.number(DriveSettings.CARRIER),
+                    rows.choice("modulation", Modulation.class),
+                    // most drives sample at both peaks of the carrier
+                    rows.choice("carrier sampling", CarrierSampling.class, CarrierSampling.TWICE),
+                    rows.number(DriveSettings.DEAD_TIME),
+                    rising,
+                    rows.number(DriveSettings.SLEW_FALLING, rising),
+                    rows.choice("edge shape", EdgeForm.class, EdgeForm.EXPONENTIAL),
+                    rows.built(curve),
+                    rows.optional(DriveSettings.LINK_VOLTAGE));
+        });
+    }
+
+    /** The operating points: a list has a value for each, a single value holds for all. */
+    private static List<OperatingPoint> points(QuantityTable rows) {
+        List<Range> ranges = List.of(OperatingPoint.OUTPUT, OperatingPoint.CURRENT, OperatingPoint.POWER_FACTOR);
+        List<List<Double>> lists = ranges.stream().map(rows::numbers).toList();
+        int count = lists.stream().mapToInt(List::size).max().orElseThrow();
+        boolean fitting = true;
+        for (int i = 0; i < lists.size(); i++) {
+            int size = lists.get(i).size();
+            if (size > 1 && size < count) {
+                String quantity = ranges.get(i).quantity();
+                rows.refuse(
+                        rows.written(quantity),
+                        quantity + " has " + size + " values where another row has " + count
+                                + "; wanted is one value or as many as there are operating points");
+            }
+            fitting &= size == 1 || size == count;
+        }
+        if (!fitting || lists.stream().anyMatch(List::isEmpty)) {
+            return List.of();
+        }
+        List<OperatingPoint> points = new ArrayList<>();
+        for (int i = 0; i < count; i++) {
+            points.add(new OperatingPoint(of(lists.get(0), i), of(lists.get(1), i), of(lists.get(2), i)));
+        }
+        return points;
+    }
+
+    private static double of(List<Double> list, int point) {
+        return list.get(list.size() == 1 ? 0 : point);
+    }
+}
