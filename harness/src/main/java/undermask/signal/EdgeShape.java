@@ -22,4 +22,11 @@ public sealed interface EdgeShape permits IdealEdge, RampEdge, RaisedCosineEdge,
 
     /** Transition time between the rails in s: ΔV divided by dv/dt. */
     double transitionTime();
+
+    /** Refuses a transition time that is not positive and finite. */
+    static void checkTransition(double transitionTime) {
+        if (!(transitionTime > 0) || Double.isInfinite(transitionTime)) {
+            throw new IllegalArgumentException("transition time of an edge is " + transitionTime + " s");
+        }
+    }
 }
