@@ -1,5 +1,6 @@
 package undermask.check;
 
+import undermask.mask.Verdict;
 import undermask.unit.Dimension;
 import undermask.unit.Range;
 
@@ -15,5 +16,14 @@ public record Policy(double requiredMarginDb, boolean tightPasses) {
     /** Builds a policy; the margin must lie in its range. */
     public Policy {
         REQUIRED_MARGIN.check(requiredMarginDb);
+    }
+
+    /** Whether the gate lets a verdict through. */
+    public boolean passes(Verdict verdict) {
+        return switch (verdict) {
+            case CLEAR -> true;
+            case TIGHT -> tightPasses;
+            case OVER -> false;
+        };
     }
 }

@@ -3,10 +3,12 @@ package undermask.check;
 import java.util.List;
 import java.util.Map;
 import java.util.Objects;
+import java.util.Set;
 import undermask.drive.DriveSettings;
 import undermask.drive.OperatingPoint;
 import undermask.installation.Installation;
 import undermask.mask.Mask;
+import undermask.pwm.Bridge;
 import undermask.unit.Place;
 
 /**
@@ -28,7 +30,11 @@ public record Profile(
     /** Key of the place that means the profile's file as a whole. */
     public static final String FILE = "";
 
-    /** Builds a profile of at least one operating point. */
+    /**
+     * Builds a profile of at least one operating point.
+     *
+     * @throws IllegalArgumentException when a point is named twice or asks for what no bridge can do
+     */
     public Profile {
         Objects.requireNonNull(name);
         Objects.requireNonNull(settings);
@@ -43,6 +49,11 @@ public record Profile(
         if (!places.containsKey(FILE)) {
             throw new IllegalArgumentException("profile " + name + " does not say which file it came from");
         }
+        if (Set.copyOf(points).size() < points.size()) {
+            throw new IllegalArgumentException("two operating points are alike");
+        }
+        double link = linkVoltage(settings, installation);
+        points.forEach(point -> Bridge.refuseImpossible(settings, point, link));
     }
 
     /** Where a quantity stands, or the file when it was left to its default. */
@@ -52,6 +63,10 @@ public record Profile(
 
     /** Mean voltage of the DC link in V: as set, else from the supply at light load. */
     public double linkVoltage() {
+        return linkVoltage(settings, installation);
+    }
+
+    private static double linkVoltage(DriveSettings settings, Installation installation) {
         return settings.linkVoltage().orElseGet(() -> installation.supply().lightLoadLinkVoltage());
     }
 }

@@ -2,7 +2,6 @@ package undermask.check;
 
 import java.util.List;
 import undermask.mask.Judgement;
-import undermask.mask.Verdict;
 import undermask.receiver.Trace;
 
 /**
@@ -20,29 +19,5 @@ public record ProfileResult(Profile profile, List<PointResult> points, Trace env
         if (judgements.isEmpty()) {
             throw new IllegalArgumentException("profile " + profile.name() + " was held against no limit");
         }
-    }
-
-    /** The worst verdict over detectors. */
-    public Verdict verdict() {
-        return judgements.stream().map(Judgement::verdict).reduce(Verdict.CLEAR, Verdict::worse);
-    }
-
-    /** Whether the gate lets a judgement of this profile through. */
-    public boolean passes(Judgement judgement) {
-        return switch (judgement.verdict()) {
-            case CLEAR -> true;
-            case TIGHT -> profile.policy().tightPasses();
-            case OVER -> false;
-        };
-    }
-
-    /** Whether the gate lets the profile through. */
-    public boolean passes() {
-        return judgements.stream().allMatch(this::passes);
-    }
-
-    /** The order of the carrier multiple nearest to a frequency. */
-    public long carrierOrder(double frequencyHz) {
-        return Math.round(frequencyHz / profile.settings().carrierHz());
     }
 }

@@ -28,9 +28,10 @@ public record OperatingPoint(double outputHz, double loadCurrentRms, double disp
         return Math.acos(displacementPowerFactor);
     }
 
-    /** A short name for tables: {@code 50 Hz 8.2 A}. */
+    /** A short name for tables: {@code 50 Hz 8.2 A 0.82}. */
     public String label() {
-        return Figures.withUnit(outputHz, Dimension.FREQUENCY, 4) + " "
-                + Figures.withUnit(loadCurrentRms, Dimension.CURRENT, 3);
+        return Figures.withUnit(outputHz, Dimension.FREQUENCY, 6) + " "
+                + Figures.withUnit(loadCurrentRms, Dimension.CURRENT, 6) + " "
+                + Figures.significant(displacementPowerFactor, 6);
     }
 }

@@ -49,8 +49,9 @@ final class ProfileFile {
         }
         Map<String, Place> places = new HashMap<>(rows.places());
         places.put(Profile.FILE, Place.of(source.file()));
-        return Optional.of(
-                new Profile(name, settings.get(), points, installation.get(), mask.get(), policy.get(), places));
+        return rows.record(
+                OperatingPoint.OUTPUT.quantity(),
+                () -> new Profile(name, settings.get(), points, installation.get(), mask.get(), policy.get(), places));
     }
 
     private static Optional<DriveSettings> settings(QuantityTable rows) {

@@ -40,8 +40,7 @@ public final class Bridge {
      */
     public static Bridge switching(DriveSettings settings, OperatingPoint point, double linkVoltage) {
         AnalysisWindow window = AnalysisWindow.of(settings.carrierHz(), point.outputHz());
-        double phasePeak = settings.voltageCurve().lineVoltage(point.outputHz()) * Math.sqrt(2.0 / 3);
-        Reference reference = new Reference(settings.modulation(), phasePeak / (linkVoltage / 2));
+        Reference reference = reference(settings, point, linkVoltage);
         CarrierComparison comparison = new CarrierComparison(window, reference, settings.sampling());
         EdgeShape rising = shape(settings.edgeForm(), linkVoltage / settings.slewRising());
         EdgeShape falling = shape(settings.edgeForm(), linkVoltage / settings.slewFalling());
@@ -55,6 +54,21 @@ public final class Bridge {
                 .map(instants -> edges(instants, window.seconds(), linkVoltage, rising, falling))
                 .toList();
         return new Bridge(window, linkVoltage, reference, legs);
+    }
+
+    /**
+     * Refuses what no bridge can do, without the work of switching it.
+     *
+     * @throws IllegalArgumentException as {@link #switching} would
+     */
+    public static void refuseImpossible(DriveSettings settings, OperatingPoint point, double linkVoltage) {
+        AnalysisWindow.of(settings.carrierHz(), point.outputHz());
+        reference(settings, point, linkVoltage);
+    }
+
+    private static Reference reference(DriveSettings settings, OperatingPoint point, double linkVoltage) {
+        double phasePeak = settings.voltageCurve().lineVoltage(point.outputHz()) * Math.sqrt(2.0 / 3);
+        return new Reference(settings.modulation(), phasePeak / (linkVoltage / 2));
     }
 
     private static EdgeShape shape(EdgeForm form, double transitionTime) {

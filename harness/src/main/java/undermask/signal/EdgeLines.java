@@ -2,10 +2,8 @@ package undermask.signal;
 
 /** Lines of an edge train, a block of neighbouring lines per transform. */
 final class EdgeLines implements Lines {
-    private static final int MODES = 1 << 14;
-
     private final EdgeTrain train;
-    private final NonUniformTransform transform = NonUniformTransform.of(MODES);
+    private final NonUniformTransform transform = NonUniformTransform.BLOCK;
     private final int[] start;
     private final double[] weights;
     private final double[] grid;
@@ -31,8 +29,8 @@ final class EdgeLines implements Lines {
         if (first < 1) {
             throw new IllegalArgumentException("line " + first + " is not above zero");
         }
-        for (int done = 0; done < count; done += MODES) {
-            block(first + done, Math.min(MODES, count - done), re, im, done);
+        for (int done = 0; done < count; done += transform.modes()) {
+            block(first + done, Math.min(transform.modes(), count - done), re, im, done);
         }
     }
 
@@ -40,7 +38,7 @@ final class EdgeLines implements Lines {
         java.util.Arrays.fill(re, to, to + count, 0);
         java.util.Arrays.fill(im, to, to + count, 0);
         for (int shape = 0; shape < train.shapes().size(); shape++) {
-            spread(shape, first + MODES / 2);
+            spread(shape, first + transform.modes() / 2);
             transform.forward(grid);
             gather(train.shapes().get(shape), first, count, re, im, to);
         }
@@ -60,7 +58,8 @@ final class EdgeLines implements Lines {
             double im = train.step(e) * Math.sin(angle);
             int offset = e * NonUniformTransform.WIDTH;
             for (int i = 0; i < NonUniformTransform.WIDTH; i++) {
-                int point = 2 * Math.floorMod(start[e] + i, points);
+                int point = start[e] + i;
+                point = 2 * (point < points ? point : point - points);
                 grid[point] += weights[offset + i] * re;
                 grid[point + 1] += weights[offset + i] * im;
             }

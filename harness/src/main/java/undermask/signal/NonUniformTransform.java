@@ -1,6 +1,5 @@
 package undermask.signal;
 
-import java.util.concurrent.ConcurrentHashMap;
 import org.jtransforms.fft.DoubleFFT_1D;
 import pl.edu.icm.jlargearrays.ConcurrencyUtils;
 
@@ -22,7 +21,9 @@ final class NonUniformTransform {
 
     private static final double BETA = 2.3 * WIDTH;
     private static final int OVERSAMPLING = 2;
-    private static final ConcurrentHashMap<Integer, NonUniformTransform> PLANS = new ConcurrentHashMap<>();
+
+    /** The one plan: lines per block. Immutable, hence shared. */
+    static final NonUniformTransform BLOCK = new NonUniformTransform(1 << 14);
 
     private final int modes;
     private final int grid;
@@ -39,13 +40,9 @@ final class NonUniformTransform {
         }
     }
 
-    /**
-     * The plan for so many modes; plans are shared and immutable.
-     *
-     * @param modes a power of two, at least 2·WIDTH
-     */
-    static NonUniformTransform of(int modes) {
-        return PLANS.computeIfAbsent(modes, NonUniformTransform::new);
+    /** Lines that one transform gives. */
+    int modes() {
+        return modes;
     }
 
     /** Points of the oversampled grid. */
@@ -58,7 +55,7 @@ final class NonUniformTransform {
      *
      * @param place in periods, 0 to 1
      * @param weights receives WIDTH weights from {@code offset}
-     * @return the first grid point, possibly negative: it wraps
+     * @return the first grid point; those that follow wrap at the grid's end
      */
     int spread(double place, double[] weights, int offset) {
         double centre = place * grid;
@@ -67,7 +64,7 @@ final class NonUniformTransform {
             double z = (start + i - centre) / (WIDTH / 2.0);
             weights[offset + i] = Math.abs(z) <= 1 ? Math.exp(BETA * (Math.sqrt(1 - z * z) - 1)) : 0;
         }
-        return start;
+        return Math.floorMod(start, grid);
     }
 
     /**
@@ -90,7 +87,7 @@ final class NonUniformTransform {
         return deconvolution[mode];
     }
 
-    /** Transform of the kernel at an angle per grid point, by Gauss–Legendre-like midpoint sums of the smooth integrand. */
+    /** Transform of the kernel at an angle per grid point, by midpoint sums of the smooth integrand. */
     private static double kernelTransform(double angle) {
         // z = sin u makes the integrand periodic and smooth, so that the midpoint rule converges exponentially
         int nodes = 200;

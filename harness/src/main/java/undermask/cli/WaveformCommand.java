@@ -1,0 +1,77 @@
+package undermask.cli;
+
+import java.nio.file.Path;
+import java.util.List;
+import java.util.concurrent.Callable;
+import picocli.CommandLine;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
+import picocli.CommandLine.Model.CommandSpec;
+import picocli.CommandLine.Option;
+import picocli.CommandLine.Parameters;
+import picocli.CommandLine.Spec;
+import undermask.check.Profile;
+import undermask.input.ProfileFolder;
+import undermask.report.ReportFolder;
+import undermask.report.WaveformRun;
+
+/** Writes the waveforms of a profile and their line spectra. */
+@Command(
+        name = "waveform",
+        description = "Writes the waveforms of a profile and their line spectra.%n",
+        mixinStandardHelpOptions = true)
+final class WaveformCommand implements Callable<Integer> {
+    private final Main.Console console;
+
+    @Spec
+    private CommandSpec spec;
+
+    @Mixin
+    private Main.Folders folders;
+
+    @Option(
+            names = "--reports",
+            paramLabel = "DIR",
+            defaultValue = "reports",
+            description = "Folder of reports (default: ${DEFAULT-VALUE}).")
+    private Path reports;
+
+    @Option(
+            names = "--point",
+            paramLabel = "N",
+            defaultValue = "1",
+            description = "Operating point, counted from 1 (default: ${DEFAULT-VALUE}).")
+    private int point;
+
+    @Option(names = "--quiet", description = "Print nothing but refusals and faults.")
+    private boolean quiet;
+
+    @Option(names = "--no-charts", description = "Leave the charts out.")
+    private boolean noCharts;
+
+    @Parameters(paramLabel = "PROFILE", description = "Name of a profile, or path of a CSV file.")
+    private String profile;
+
+    WaveformCommand(Main.Console console) {
+        this.console = console;
+    }
+
+    @Override
+    public Integer call() throws Exception {
+        Profile read =
+                new ProfileFolder(folders.profiles).read(List.of(profile)).get(0);
+        if (point < 1 || point > read.points().size()) {
+            throw new CommandLine.ParameterException(
+                    spec.commandLine(),
+                    "--point is " + point + "; " + read.name() + " has points 1 to "
+                            + read.points().size());
+        }
+        List<String> said = new WaveformRun(new ReportFolder(reports), !noCharts, console.err()::println)
+                .of(read, read.points().get(point - 1));
+        if (!quiet) {
+            said.forEach(console.out()::println);
+            console.out().println("reports: " + reports.resolve(read.name()));
+        }
+        return Main.CLEAR;
+    }
+}

@@ -1,0 +1,63 @@
+package undermask.gate;
+
+import java.io.IOException;
+import java.nio.file.Path;
+import java.util.List;
+import java.util.stream.Stream;
+import org.junit.jupiter.api.DynamicTest;
+import org.junit.jupiter.api.TestFactory;
+import undermask.input.ProfileFolder;
+import undermask.input.Refused;
+import undermask.report.CheckRun;
+import undermask.report.Finding;
+import undermask.report.Outcome;
+import undermask.report.ReportFolder;
+
+/**
+ * A test for each profile and detector of a folder, for builds that run JUnit. The system properties
+ * {@code undermask.profiles} and {@code undermask.reports} name the folders; without them they are {@code .} and
+ * {@code reports}.
+ */
+public final class ProfilesGate {
+    /** Public for the test engine. */
+    public ProfilesGate() {}
+
+    @TestFactory
+    Stream<DynamicTest> profiles() throws IOException {
+        Path profiles = Path.of(System.getProperty("undermask.profiles", "."));
+        Path reports = Path.of(System.getProperty("undermask.reports", "reports"));
+        List<Outcome> outcomes;
+        try {
+            outcomes = new CheckRun(
+                            new ReportFolder(reports),
+                            Runtime.getRuntime().availableProcessors(),
+                            true,
+                            System.err::println)
+                    .of(new ProfileFolder(profiles).readAll());
+        } catch (Refused e) {
+            return Stream.of(DynamicTest.dynamicTest("profiles can be read", () -> {
+                throw failure("refused, no profile was checked:\n" + e.getMessage());
+            }));
+        }
+        return outcomes.stream().flatMap(ProfilesGate::tests);
+    }
+
+    private static Stream<DynamicTest> tests(Outcome outcome) {
+        return outcome.judgements().stream()
+                .map(judgement -> DynamicTest.dynamicTest(
+                        outcome.profile().name() + ": " + judgement.detector().words() + " against "
+                                + outcome.profile().mask().name(),
+                        () -> {
+                            if (!outcome.passes(judgement)) {
+                                throw failure(new Finding(outcome, judgement).text());
+                            }
+                        }));
+    }
+
+    /** A failure without a stack trace: it is about a file, not about code. */
+    private static AssertionError failure(String message) {
+        AssertionError failure = new AssertionError(message);
+        failure.setStackTrace(new StackTraceElement[0]);
+        return failure;
+    }
+}

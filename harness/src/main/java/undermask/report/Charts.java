@@ -1,0 +1,186 @@
+package undermask.report;
+
+import java.awt.BasicStroke;
+import java.awt.Color;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Map;
+import java.util.OptionalDouble;
+import java.util.TreeMap;
+import org.knowm.xchart.XYChart;
+import org.knowm.xchart.XYSeries;
+import org.knowm.xchart.style.XYStyler;
+import org.knowm.xchart.style.markers.SeriesMarkers;
+import undermask.mask.Judgement;
+import undermask.mask.LimitSegment;
+import undermask.mask.Mask;
+import undermask.receiver.Detector;
+import undermask.receiver.Trace;
+import undermask.signal.EdgeShape;
+import undermask.signal.EdgeTrain;
+import undermask.unit.Dimension;
+import undermask.unit.Figures;
+
+/** The charts of a profile. */
+final class Charts {
+    /** Blue, orange and grey differ also for eyes that cannot tell red from green. */
+    private static final Map<Detector, Color> COLOURS = Map.of(
+            Detector.PEAK, new Color(0x9a, 0xa5, 0xae),
+            Detector.QUASI_PEAK, new Color(0xd9, 0x6b, 0x0c),
+            Detector.AVERAGE, new Color(0x0b, 0x5f, 0xa5));
+
+    private static final BasicStroke TRACE = new BasicStroke(1.2f, BasicStroke.CAP_ROUND, BasicStroke.JOIN_ROUND);
+    private static final BasicStroke LIMIT =
+            new BasicStroke(2.2f, BasicStroke.CAP_BUTT, BasicStroke.JOIN_ROUND, 10, new float[] {9, 5}, 0);
+    private static final int BUCKETS = 1400;
+    private static final double LOWEST_SHOWN = 0;
+
+    private Charts() {}
+
+    /** The three detectors against their limits, worst frequencies marked. */
+    static Picture spectrum(String title, Trace trace, Mask mask, List<Judgement> judgements) {
+        XYChart chart = Canvas.chart(title, "frequency", "level in dB\u00b5V", 620);
+        double low =
+                mask.segments().stream().mapToDouble(LimitSegment::fromHz).min().orElseThrow();
+        double high = trace.frequency(trace.size() - 1);
+        XYStyler style = chart.getStyler();
+        style.setXAxisLogarithmic(true);
+        style.setXAxisLogarithmicDecadeOnly(false);
+        style.setXAxisMin(low);
+        style.setXAxisMax(high);
+        style.setxAxisTickLabelsFormattingFunction(Charts::tickLabel);
+        double top = 0;
+        for (Detector detector : Detector.values()) {
+            if (!Double.isNaN(trace.levelDbuv(detector, 0))) {
+                top = Math.max(top, addTrace(chart, trace, detector, low));
+            }
+        }
+        for (Detector detector : mask.detectors()) {
+            top = Math.max(top, addLimit(chart, mask, detector));
+        }
+        for (Judgement judgement : judgements) {
+            XYSeries worst = chart.addSeries(
+                    "worst " + judgement.detector().words(),
+                    new double[] {judgement.frequencyHz()},
+                    new double[] {judgement.levelDbuv()});
+            worst.setMarker(SeriesMarkers.CIRCLE);
+            worst.setMarkerColor(COLOURS.get(judgement.detector()).darker());
+            worst.setLineColor(new Color(0, 0, 0, 0));
+            worst.setShowInLegend(false);
+        }
+        style.setMarkerSize(11);
+        style.setYAxisMin(LOWEST_SHOWN);
+        style.setYAxisMax(10 * Math.ceil((top + 3) / 10));
+        return Canvas.stacked(List.of(chart));
+    }
+
+    private static String tickLabel(double hz) {
+        return Figures.withUnit(hz, Dimension.FREQUENCY, 3);
+    }
+
+    /** Adds a trace thinned to the highest step of each bucket, and returns its top. */
+    private static double addTrace(XYChart chart, Trace trace, Detector detector, double low) {
+        double span = Math.log(trace.frequency(trace.size() - 1) / low);
+        TreeMap<Integer, Integer> highest = new TreeMap<>();
+        double top = 0;
+        for (int step = 0; step < trace.size(); step++) {
+            double frequency = trace.frequency(step);
+            if (frequency >= low) {
+                int bucket = (int) (Math.log(frequency / low) / span * BUCKETS);
+                int here = step;
+                highest.merge(
+                        bucket, here, (a, b) -> trace.levelDbuv(detector, a) >= trace.levelDbuv(detector, b) ? a : b);
+                top = Math.max(top, trace.levelDbuv(detector, step));
+            }
+        }
+        XYSeries series = chart.addSeries(
+                detector.words(),
+                highest.values().stream().mapToDouble(trace::frequency).toArray(),
+                highest.values().stream()
+                        .mapToDouble(step -> Math.max(LOWEST_SHOWN, trace.levelDbuv(detector, step)))
+                        .toArray());
+        dress(series, COLOURS.get(detector), TRACE);
+        return top;
+    }
+
+    private static double addLimit(XYChart chart, Mask mask, Detector detector) {
+        List<Double> x = new ArrayList<>();
+        List<Double> y = new ArrayList<>();
+        for (LimitSegment segment : mask.segments()) {
+            if (segment.detector() == detector) {
+                x.addAll(List.of(segment.fromHz(), segment.toHz()));
+                y.addAll(List.of(segment.fromDbuv(), segment.toDbuv()));
+            }
+        }
+        dress(chart.addSeries("limit " + detector.words(), x, y), COLOURS.get(detector), LIMIT);
+        return y.stream().mapToDouble(Double::doubleValue).max().orElseThrow();
+    }
+
+    /** Line-to-line and common-mode voltage over one output period, and one edge of the common mode. */
+    static Picture waveform(String title, EdgeTrain lineToLine, EdgeTrain commonMode, double outputHz) {
+        XYChart line = Canvas.chart(title, "time in ms", "line to line in V", 300);
+        addSteps(line, "line to line", lineToLine, 1 / outputHz, COLOURS.get(Detector.AVERAGE));
+        XYChart common = Canvas.chart("", "time in ms", "common mode in V", 280);
+        addSteps(common, "common mode", commonMode, 1 / outputHz, COLOURS.get(Detector.QUASI_PEAK));
+        List<XYChart> charts = new ArrayList<>(List.of(line, common));
+        steepest(lineToLine).ifPresent(edge -> charts.add(edge(lineToLine, (int) edge)));
+        charts.forEach(chart -> chart.getStyler().setLegendVisible(false));
+        return Canvas.stacked(charts);
+    }
+
+    private static void addSteps(XYChart chart, String name, EdgeTrain train, double span, Color colour) {
+        List<Double> x = new ArrayList<>(List.of(0.0));
+        double level = train.initialLevel();
+        List<Double> y = new ArrayList<>(List.of(level));
+        for (int e = 0; e < train.size() && train.time(e) < span; e++) {
+            x.addAll(List.of(1e3 * train.time(e), 1e3 * train.time(e)));
+            y.addAll(List.of(level, level + train.step(e)));
+            level += train.step(e);
+        }
+        x.add(1e3 * span);
+        y.add(level);
+        dress(chart.addSeries(name, x, y), colour, TRACE);
+        chart.getStyler().setXAxisMin(0.0);
+        chart.getStyler().setXAxisMax(1e3 * span);
+    }
+
+    /** The first rising edge with the shortest transition. */
+    private static OptionalDouble steepest(EdgeTrain train) {
+        int best = -1;
+        for (int e = 0; e < train.size(); e++) {
+            if (train.step(e) > 0
+                    && (best < 0
+                            || train.shape(e).transitionTime()
+                                    < train.shape(best).transitionTime())) {
+                best = e;
+            }
+        }
+        return best < 0 ? OptionalDouble.empty() : OptionalDouble.of(best);
+    }
+
+    private static XYChart edge(EdgeTrain train, int edge) {
+        EdgeShape shape = train.shape(edge);
+        double from = train.initialLevel();
+        for (int e = 0; e < edge; e++) {
+            from += train.step(e);
+        }
+        double reach = Math.max(2 * shape.transitionTime(), 1e-9);
+        int points = 400;
+        double[] x = new double[points];
+        double[] y = new double[points];
+        for (int i = 0; i < points; i++) {
+            double time = reach * (2.0 * i / (points - 1) - 1);
+            x[i] = 1e9 * time;
+            y[i] = from + train.step(edge) * shape.response(time);
+        }
+        XYChart chart = Canvas.chart("", "time in ns around the edge", "line to line in V", 280);
+        dress(chart.addSeries("edge", x, y), COLOURS.get(Detector.AVERAGE), new BasicStroke(2f));
+        return chart;
+    }
+
+    private static void dress(XYSeries series, Color colour, BasicStroke stroke) {
+        series.setMarker(SeriesMarkers.NONE);
+        series.setLineColor(colour);
+        series.setLineStyle(stroke);
+    }
+}

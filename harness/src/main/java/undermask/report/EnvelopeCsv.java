@@ -1,0 +1,45 @@
+package undermask.report;
+
+import java.util.ArrayList;
+import java.util.List;
+import undermask.mask.Mask;
+import undermask.receiver.Detector;
+import undermask.receiver.Trace;
+
+/** What the receiver shows at each tuning step, with the limits beside it. */
+final class EnvelopeCsv {
+    private static final List<String> HEADER = List.of(
+            "frequency_hz",
+            "peak_dbuv",
+            "quasi_peak_dbuv",
+            "average_dbuv",
+            "limit_quasi_peak_dbuv",
+            "limit_average_dbuv");
+
+    private EnvelopeCsv() {}
+
+    /** The table; a mask that limits the peak detector gets a column more. */
+    static String of(Trace trace, Mask mask) {
+        boolean limitsPeak = mask.detectors().contains(Detector.PEAK);
+        List<String> header = new ArrayList<>(HEADER);
+        List<Detector> limited = new ArrayList<>(List.of(Detector.QUASI_PEAK, Detector.AVERAGE));
+        if (limitsPeak) {
+            header.add("limit_peak_dbuv");
+            limited.add(Detector.PEAK);
+        }
+        Csv csv = new Csv(header);
+        for (int step = 0; step < trace.size(); step++) {
+            double frequency = trace.frequency(step);
+            List<String> cells = new ArrayList<>();
+            cells.add(Csv.frequency(frequency));
+            for (Detector detector : Detector.values()) {
+                cells.add(Csv.level(trace.levelDbuv(detector, step)));
+            }
+            for (Detector detector : limited) {
+                cells.add(Csv.level(mask.limitDbuv(detector, frequency).orElse(Double.NaN)));
+            }
+            csv.row(cells.toArray());
+        }
+        return csv.toString();
+    }
+}

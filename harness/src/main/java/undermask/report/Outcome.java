@@ -1,0 +1,68 @@
+package undermask.report;
+
+import java.util.Comparator;
+import java.util.List;
+import undermask.check.PointResult;
+import undermask.check.Profile;
+import undermask.check.ProfileResult;
+import undermask.mask.Judgement;
+import undermask.mask.Verdict;
+import undermask.receiver.Detector;
+
+/**
+ * What is kept of a checked profile when its own reports are written: judgements, no traces.
+ *
+ * @param points label and judgements of each operating point
+ * @param judgements worst frequency of each limited detector over all points
+ */
+public record Outcome(Profile profile, List<Point> points, List<Judgement> judgements) {
+    /** An operating point's judgements. */
+    public record Point(String label, List<Judgement> judgements) {
+        Judgement of(Detector detector) {
+            return judgements.stream()
+                    .filter(judgement -> judgement.detector() == detector)
+                    .findFirst()
+                    .orElseThrow();
+        }
+    }
+
+    static Outcome of(ProfileResult result) {
+        return new Outcome(
+                result.profile(),
+                result.points().stream()
+                        .map((PointResult point) -> new Point(point.point().label(), point.judgements()))
+                        .toList(),
+                result.judgements());
+    }
+
+    /** The judgement with the least left of what its policy asks for. */
+    public Judgement worst() {
+        return judgements.stream()
+                .min(Comparator.comparingDouble(judgement -> judgement.marginDb() - judgement.requiredDb()))
+                .orElseThrow();
+    }
+
+    /** The worst verdict over detectors. */
+    public Verdict verdict() {
+        return judgements.stream().map(Judgement::verdict).reduce(Verdict.CLEAR, Verdict::worse);
+    }
+
+    /** Whether the profile's policy lets a judgement through. */
+    public boolean passes(Judgement judgement) {
+        return profile.policy().passes(judgement.verdict());
+    }
+
+    /** Whether the profile's policy lets all of it through. */
+    public boolean passes() {
+        return judgements.stream().allMatch(this::passes);
+    }
+
+    /** The operating point at which a detector reads worst. */
+    String pointOf(Judgement judgement) {
+        return points.stream()
+                .min(Comparator.comparingDouble(
+                        (Point point) -> point.of(judgement.detector()).marginDb()))
+                .orElseThrow()
+                .label();
+    }
+}
