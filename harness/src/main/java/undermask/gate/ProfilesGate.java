@@ -4,6 +4,7 @@ import java.io.IOException;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.stream.Stream;
+import org.junit.jupiter.api.DisplayName;
 import org.junit.jupiter.api.DynamicTest;
 import org.junit.jupiter.api.TestFactory;
 import undermask.input.ProfileFolder;
@@ -23,6 +24,7 @@ public final class ProfilesGate {
     public ProfilesGate() {}
 
     @TestFactory
+    @DisplayName("profile")
     Stream<DynamicTest> profiles() throws IOException {
         Path profiles = Path.of(System.getProperty("undermask.profiles", "."));
         Path reports = Path.of(System.getProperty("undermask.reports", "reports"));
@@ -43,15 +45,14 @@ public final class ProfilesGate {
     }
 
     private static Stream<DynamicTest> tests(Outcome outcome) {
-        return outcome.judgements().stream()
-                .map(judgement -> DynamicTest.dynamicTest(
-                        outcome.profile().name() + ": " + judgement.detector().words() + " against "
-                                + outcome.profile().mask().name(),
-                        () -> {
-                            if (!outcome.passes(judgement)) {
-                                throw failure(new Finding(outcome, judgement).text());
-                            }
-                        }));
+        return outcome.judgements().stream().map(judgement -> {
+            Finding finding = new Finding(outcome, judgement);
+            return DynamicTest.dynamicTest(finding.title(), () -> {
+                if (!outcome.passes(judgement)) {
+                    throw failure(finding.text());
+                }
+            });
+        });
     }
 
     /** A failure without a stack trace: it is about a file, not about code. */

@@ -11,7 +11,11 @@ import java.awt.image.BufferedImage;
 import java.io.ByteArrayOutputStream;
 import java.io.IOException;
 import java.io.UncheckedIOException;
+import java.nio.charset.StandardCharsets;
+import java.util.HashMap;
 import java.util.List;
+import java.util.Map;
+import java.util.regex.Pattern;
 import javax.imageio.ImageIO;
 import org.knowm.xchart.XYChart;
 import org.knowm.xchart.XYChartBuilder;
@@ -23,7 +27,8 @@ final class Canvas {
     static final int WIDTH = 1100;
     static final Color INK = new Color(0x22, 0x2b, 0x33);
     private static final Color GRID = new Color(0xdd, 0xe2, 0xe6);
-    private static final int SCALE = 2;
+    private static final double SCALE = 1.5;
+    private static final Pattern CLIP_NAME = Pattern.compile("clip-?\\d+");
 
     private Canvas() {}
 
@@ -45,7 +50,7 @@ final class Canvas {
         style.setAxisTickLabelsColor(INK);
         style.setChartTitleFont(new Font(Font.SANS_SERIF, Font.BOLD, 17));
         style.setAxisTitleFont(new Font(Font.SANS_SERIF, Font.PLAIN, 14));
-        style.setAxisTickLabelsFont(new Font(Font.SANS_SERIF, Font.PLAIN, 13));
+        style.setAxisTickLabelsFont(new Font(Font.SANS_SERIF, Font.PLAIN, 11));
         style.setLegendFont(new Font(Font.SANS_SERIF, Font.PLAIN, 13));
         style.setChartTitleBoxVisible(false);
         style.setLegendPosition(Styler.LegendPosition.OutsideS);
@@ -60,7 +65,8 @@ final class Canvas {
     /** Charts below each other. */
     static Picture stacked(List<XYChart> charts) {
         int height = charts.stream().mapToInt(XYChart::getHeight).sum();
-        BufferedImage image = new BufferedImage(SCALE * WIDTH, SCALE * height, BufferedImage.TYPE_INT_RGB);
+        BufferedImage image =
+                new BufferedImage((int) (SCALE * WIDTH), (int) (SCALE * height), BufferedImage.TYPE_INT_RGB);
         Graphics2D pixels = image.createGraphics();
         pixels.scale(SCALE, SCALE);
         pixels.setRenderingHint(RenderingHints.KEY_ANTIALIASING, RenderingHints.VALUE_ANTIALIAS_ON);
@@ -75,10 +81,19 @@ final class Canvas {
             new SVGProcessor()
                     .getDocument(vectors.getCommands(), new PageSize(WIDTH, height))
                     .writeTo(svg);
-            return new Picture(png.toByteArray(), svg.toByteArray());
+            return new Picture(png.toByteArray(), withStableNames(svg.toString(StandardCharsets.UTF_8)));
         } catch (IOException e) {
             throw new UncheckedIOException(e);
         }
+    }
+
+    /** Numbers the clip paths in their order; the writer names them differently at each run. */
+    private static byte[] withStableNames(String svg) {
+        Map<String, String> names = new HashMap<>();
+        return CLIP_NAME
+                .matcher(svg)
+                .replaceAll(found -> names.computeIfAbsent(found.group(), name -> "clip-" + (names.size() + 1)))
+                .getBytes(StandardCharsets.UTF_8);
     }
 
     private static void paint(List<XYChart> charts, Graphics2D graphics) {

@@ -18,8 +18,6 @@ import undermask.receiver.Detector;
 import undermask.receiver.Trace;
 import undermask.signal.EdgeShape;
 import undermask.signal.EdgeTrain;
-import undermask.unit.Dimension;
-import undermask.unit.Figures;
 
 /** The charts of a profile. */
 final class Charts {
@@ -32,23 +30,23 @@ final class Charts {
     private static final BasicStroke TRACE = new BasicStroke(1.2f, BasicStroke.CAP_ROUND, BasicStroke.JOIN_ROUND);
     private static final BasicStroke LIMIT =
             new BasicStroke(2.2f, BasicStroke.CAP_BUTT, BasicStroke.JOIN_ROUND, 10, new float[] {9, 5}, 0);
-    private static final int BUCKETS = 1400;
+    private static final int BUCKETS = 600;
     private static final double LOWEST_SHOWN = 0;
+    private static final double MEGAHERTZ = 1e6;
 
     private Charts() {}
 
     /** The three detectors against their limits, worst frequencies marked. */
     static Picture spectrum(String title, Trace trace, Mask mask, List<Judgement> judgements) {
-        XYChart chart = Canvas.chart(title, "frequency", "level in dB\u00b5V", 620);
+        XYChart chart = Canvas.chart(title, "frequency in MHz", "level in dB\u00b5V", 620);
         double low =
                 mask.segments().stream().mapToDouble(LimitSegment::fromHz).min().orElseThrow();
         double high = trace.frequency(trace.size() - 1);
         XYStyler style = chart.getStyler();
         style.setXAxisLogarithmic(true);
         style.setXAxisLogarithmicDecadeOnly(false);
-        style.setXAxisMin(low);
-        style.setXAxisMax(high);
-        style.setxAxisTickLabelsFormattingFunction(Charts::tickLabel);
+        style.setXAxisMin(low / MEGAHERTZ);
+        style.setXAxisMax(high / MEGAHERTZ);
         double top = 0;
         for (Detector detector : Detector.values()) {
             if (!Double.isNaN(trace.levelDbuv(detector, 0))) {
@@ -61,7 +59,7 @@ final class Charts {
         for (Judgement judgement : judgements) {
             XYSeries worst = chart.addSeries(
                     "worst " + judgement.detector().words(),
-                    new double[] {judgement.frequencyHz()},
+                    new double[] {judgement.frequencyHz() / MEGAHERTZ},
                     new double[] {judgement.levelDbuv()});
             worst.setMarker(SeriesMarkers.CIRCLE);
             worst.setMarkerColor(COLOURS.get(judgement.detector()).darker());
@@ -72,10 +70,6 @@ final class Charts {
         style.setYAxisMin(LOWEST_SHOWN);
         style.setYAxisMax(10 * Math.ceil((top + 3) / 10));
         return Canvas.stacked(List.of(chart));
-    }
-
-    private static String tickLabel(double hz) {
-        return Figures.withUnit(hz, Dimension.FREQUENCY, 3);
     }
 
     /** Adds a trace thinned to the highest step of each bucket, and returns its top. */
@@ -95,7 +89,9 @@ final class Charts {
         }
         XYSeries series = chart.addSeries(
                 detector.words(),
-                highest.values().stream().mapToDouble(trace::frequency).toArray(),
+                highest.values().stream()
+                        .mapToDouble(step -> trace.frequency(step) / MEGAHERTZ)
+                        .toArray(),
                 highest.values().stream()
                         .mapToDouble(step -> Math.max(LOWEST_SHOWN, trace.levelDbuv(detector, step)))
                         .toArray());
@@ -108,7 +104,7 @@ final class Charts {
         List<Double> y = new ArrayList<>();
         for (LimitSegment segment : mask.segments()) {
             if (segment.detector() == detector) {
-                x.addAll(List.of(segment.fromHz(), segment.toHz()));
+                x.addAll(List.of(segment.fromHz() / MEGAHERTZ, segment.toHz() / MEGAHERTZ));
                 y.addAll(List.of(segment.fromDbuv(), segment.toDbuv()));
             }
         }
@@ -140,6 +136,7 @@ final class Charts {
         x.add(1e3 * span);
         y.add(level);
         dress(chart.addSeries(name, x, y), colour, TRACE);
+        chart.getStyler().setYAxisDecimalPattern("0");
         chart.getStyler().setXAxisMin(0.0);
         chart.getStyler().setXAxisMax(1e3 * span);
     }
@@ -164,16 +161,21 @@ final class Charts {
         for (int e = 0; e < edge; e++) {
             from += train.step(e);
         }
-        double reach = Math.max(2 * shape.transitionTime(), 1e-9);
+        double reach = 50e-9 * Math.max(1, Math.ceil(2 * shape.transitionTime() / 50e-9));
         int points = 400;
         double[] x = new double[points];
         double[] y = new double[points];
         for (int i = 0; i < points; i++) {
-            double time = reach * (2.0 * i / (points - 1) - 1);
+            double place = 2.0 * i / (points - 1) - 1;
+            // denser around the instant
+            double time = reach * place * (0.2 + 0.8 * place * place);
             x[i] = 1e9 * time;
             y[i] = from + train.step(edge) * shape.response(time);
         }
         XYChart chart = Canvas.chart("", "time in ns around the edge", "line to line in V", 280);
+        chart.getStyler().setXAxisDecimalPattern("0");
+        chart.getStyler().setXAxisMin(x[0]);
+        chart.getStyler().setXAxisMax(x[points - 1]);
         dress(chart.addSeries("edge", x, y), COLOURS.get(Detector.AVERAGE), new BasicStroke(2f));
         return chart;
     }

@@ -4,7 +4,6 @@ import java.util.List;
 import undermask.check.Profile;
 import undermask.drive.DriveSettings;
 import undermask.mask.Judgement;
-import undermask.mask.Verdict;
 import undermask.unit.Dimension;
 import undermask.unit.Figures;
 import undermask.unit.Place;
@@ -16,34 +15,43 @@ public final class Finding {
     private final Outcome outcome;
     private final Judgement judgement;
 
+    /** A judgement of an outcome, put in words. */
     public Finding(Outcome outcome, Judgement judgement) {
         this.outcome = outcome;
         this.judgement = judgement;
     }
 
+    /** What was judged and how far it is from its limit: {@code average over by 3.1 dB}. */
+    public String headline() {
+        return judgement.detector().words() + " "
+                + switch (judgement.verdict()) {
+                    case CLEAR -> "clear by " + Figures.fixed(judgement.marginDb(), 1) + " dB";
+                    case TIGHT -> "tight, " + Figures.fixed(judgement.marginDb(), 1) + " dB left";
+                    case OVER -> "over by " + Figures.fixed(-judgement.marginDb(), 1) + " dB";
+                };
+    }
+
+    /** A finding in a line: {@code brine-pump: average clear by 6.5 dB at 9.681 MHz (iec61800-3-c2)}. */
+    public String title() {
+        return profile().name() + ": " + headline() + " at " + frequency(judgement) + " ("
+                + profile().mask().name() + ")";
+    }
+
     /** The lines of the finding, the first one beginning with {@code file:line:column:}. */
     public List<String> lines() {
         return List.of(
-                place() + ":",
-                "  " + judgement.verdict().words() + ": " + headline(),
-                "  " + judgement.detector().words() + " " + level(judgement.levelDbuv()) + " at "
-                        + frequency(judgement) + " (" + order(outcome, judgement) + "), limit "
-                        + level(judgement.limitDbuv()),
-                "  mask " + profile().mask().name() + ", worst at " + outcome.pointOf(judgement),
+                place() + ": " + headline(),
+                "  reads " + level(judgement.levelDbuv()) + " at " + frequency(judgement) + " ("
+                        + order(outcome, judgement) + "), limit " + level(judgement.limitDbuv()),
+                "  mask " + profile().mask().name() + ", " + Figures.fixed(judgement.requiredDb(), 1)
+                        + " dB margin required",
+                "  worst at " + outcome.pointOf(judgement),
                 "  next: " + next());
     }
 
     /** The finding as one text. */
     public String text() {
         return String.join("\n", lines());
-    }
-
-    private String headline() {
-        double margin = judgement.marginDb();
-        return judgement.verdict() == Verdict.OVER
-                ? Figures.fixed(-margin, 1) + " dB above the limit"
-                : Figures.fixed(margin, 1) + " dB under the limit, " + Figures.fixed(judgement.requiredDb(), 1)
-                        + " dB required";
     }
 
     private Place place() {

@@ -39,15 +39,18 @@ public final class ReportFolder {
         if (!target.startsWith(root.normalize())) {
             throw new IOException(target + " lies outside the report folder " + root);
         }
-        Path half = null;
+        // not a temporary file of the runtime: those are for the owner's eyes only
+        Path half =
+                target.resolveSibling("." + file + "." + ProcessHandle.current().pid() + ".part");
         try {
             Files.createDirectories(target.getParent());
-            half = Files.createTempFile(target.getParent(), ".", ".part");
             Files.write(half, content);
             Files.move(half, target, StandardCopyOption.ATOMIC_MOVE, StandardCopyOption.REPLACE_EXISTING);
         } catch (IOException e) {
-            if (half != null) {
+            try {
                 Files.deleteIfExists(half);
+            } catch (IOException second) {
+                e.addSuppressed(second);
             }
             throw new IOException("cannot write " + target + ": " + reason(e), e);
         }

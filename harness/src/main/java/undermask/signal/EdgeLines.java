@@ -4,6 +4,9 @@ package undermask.signal;
 final class EdgeLines implements Lines {
     private final EdgeTrain train;
     private final NonUniformTransform transform = NonUniformTransform.BLOCK;
+    /** Origins of the edges' shapes as a share of the window, 0 to 1. */
+    private final double[] places;
+
     private final int[] start;
     private final double[] weights;
     private final double[] grid;
@@ -11,11 +14,14 @@ final class EdgeLines implements Lines {
 
     EdgeLines(EdgeTrain train) {
         this.train = train;
+        this.places = new double[train.size()];
         this.start = new int[train.size()];
         this.weights = new double[train.size() * NonUniformTransform.WIDTH];
         this.grid = new double[2 * transform.grid()];
         for (int e = 0; e < start.length; e++) {
-            start[e] = transform.spread(train.time(e) / train.period(), weights, e * NonUniformTransform.WIDTH);
+            double turns = (train.time(e) - train.shape(e).lead()) / train.period();
+            places[e] = turns - Math.floor(turns);
+            start[e] = transform.spread(places[e], weights, e * NonUniformTransform.WIDTH);
         }
     }
 
@@ -52,7 +58,7 @@ final class EdgeLines implements Lines {
             if (train.shapeIndex(e) != shape) {
                 continue;
             }
-            double turns = centre * (train.time(e) / train.period());
+            double turns = centre * places[e];
             double angle = -2 * Math.PI * (turns - Math.rint(turns));
             double re = train.step(e) * Math.cos(angle);
             double im = train.step(e) * Math.sin(angle);

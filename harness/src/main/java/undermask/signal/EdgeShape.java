@@ -6,12 +6,18 @@ package undermask.signal;
  */
 public sealed interface EdgeShape permits IdealEdge, RampEdge, RaisedCosineEdge, ExponentialEdge {
     /**
-     * The spectrum factor E(f), the Fourier transform of the edge's derivative, 1 at f = 0.
+     * The spectrum factor E(f), the Fourier transform of the edge's derivative, 1 at f = 0. Time counts from the origin
+     * of the shape, {@link #lead()} before the instant of the edge.
      *
      * @param frequency in Hz
      * @param out receives real and imaginary part in its first two places
      */
     void factor(double frequency, double[] out);
+
+    /** By how many seconds the shape's origin lies before the instant of the edge. */
+    default double lead() {
+        return 0;
+    }
 
     /**
      * The edge in time: 0 long before, 1 long after.

@@ -22,6 +22,18 @@ final class NonUniformTransform {
     private static final double BETA = 2.3 * WIDTH;
     private static final int OVERSAMPLING = 2;
 
+    private static final int NODES = 20;
+    private static final double[] NODE_PLACES = new double[NODES];
+    private static final double[] NODE_WEIGHTS = new double[NODES];
+
+    static {
+        for (int i = 0; i < NODES; i++) {
+            double u = Math.PI / 2 * (i + 0.5) / NODES;
+            NODE_PLACES[i] = Math.sin(u) * WIDTH / 2;
+            NODE_WEIGHTS[i] = Math.exp(BETA * (Math.cos(u) - 1)) * Math.cos(u) * Math.PI / NODES * WIDTH / 2;
+        }
+    }
+
     /** The one plan: lines per block. Immutable, hence shared. */
     static final NonUniformTransform BLOCK = new NonUniformTransform(1 << 14);
 
@@ -35,8 +47,12 @@ final class NonUniformTransform {
         this.grid = OVERSAMPLING * modes;
         this.fft = new DoubleFFT_1D(grid);
         this.deconvolution = new double[modes];
-        for (int i = 0; i < modes; i++) {
-            deconvolution[i] = 1 / kernelTransform(2 * Math.PI * (i - modes / 2) / grid);
+        for (int bin = 0; bin <= modes / 2; bin++) {
+            double factor = 1 / kernelTransform(2 * Math.PI * bin / grid);
+            deconvolution[modes / 2 - bin] = factor;
+            if (bin < modes / 2) {
+                deconvolution[modes / 2 + bin] = factor;
+            }
         }
     }
 
@@ -87,17 +103,13 @@ final class NonUniformTransform {
         return deconvolution[mode];
     }
 
-    /** Transform of the kernel at an angle per grid point, by midpoint sums of the smooth integrand. */
+    /** Transform of the kernel, an even function, at an angle per grid point. */
     private static double kernelTransform(double angle) {
         // z = sin u makes the integrand periodic and smooth, so that the midpoint rule converges exponentially
-        int nodes = 200;
         double sum = 0;
-        for (int i = 0; i < nodes; i++) {
-            double u = Math.PI * ((i + 0.5) / nodes - 0.5);
-            double z = Math.sin(u);
-            double cos = Math.cos(u);
-            sum += Math.exp(BETA * (cos - 1)) * Math.cos(angle * z * WIDTH / 2) * cos;
+        for (int i = 0; i < NODES; i++) {
+            sum += NODE_WEIGHTS[i] * Math.cos(angle * NODE_PLACES[i]);
         }
-        return sum * Math.PI / nodes * WIDTH / 2;
+        return sum;
     }
 }
