@@ -7,20 +7,29 @@ import java.util.Optional;
 
 /** Finds the known name that somebody may have meant. */
 final class NearestName {
+    private static final int SHORTEST_PART = 3;
+
     private NearestName() {}
 
     /**
      * The known name with the fewest slips of the pen to a written one: letters left out, added, replaced, or swapped
-     * with their neighbour; upper and lower case count as the same.
+     * with their neighbour; upper and lower case count as the same. Of equals, the one that begins alike longest. Where
+     * none is near, the first that holds all that was written.
      *
-     * @return empty when even the nearest name differs in more than a third of the letters
+     * @return empty when even the nearest name differs in more than a third of the letters and none holds what was
+     *     written
      */
     static Optional<String> of(String written, Collection<String> known) {
         String folded = written.toLowerCase(Locale.ROOT);
         return known.stream()
                 .min(Comparator.comparingInt((String name) -> slips(folded, name.toLowerCase(Locale.ROOT)))
+                        .thenComparingInt(name -> -sharedStart(folded, name.toLowerCase(Locale.ROOT)))
                         .thenComparing(Comparator.naturalOrder()))
-                .filter(name -> slips(folded, name.toLowerCase(Locale.ROOT)) <= Math.max(1, name.length() / 3));
+                .filter(name -> slips(folded, name.toLowerCase(Locale.ROOT)) <= Math.max(1, name.length() / 3))
+                .or(() -> known.stream()
+                        .filter(name -> folded.length() >= SHORTEST_PART
+                                && name.toLowerCase(Locale.ROOT).contains(folded))
+                        .min(Comparator.naturalOrder()));
     }
 
     /**
@@ -30,6 +39,14 @@ final class NearestName {
      */
     static String hint(String written, Collection<String> names, String known) {
         return of(written, names).map(name -> "; nearest: " + name).orElse("") + "; " + known;
+    }
+
+    private static int sharedStart(String a, String b) {
+        int length = 0;
+        while (length < Math.min(a.length(), b.length()) && a.charAt(length) == b.charAt(length)) {
+            length++;
+        }
+        return length;
     }
 
     /** Distance of two words in single slips (Damerau 1964, Levenshtein 1966; neighbours are swapped at most once). */

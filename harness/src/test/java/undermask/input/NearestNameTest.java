@@ -16,11 +16,18 @@ class NearestNameTest {
         "dedtime, dead time", // left out
         "booost, boost", // added
         "lood current, load current", // replaced
+        "current, load current", // a part of it
         "Link Voltage, link voltage",
         "motor i, MOTOR I" // also where the locale has a dotless i
     })
     void findsWhatWasMeant(String written, String meant) {
         assertThat(NearestName.of(written, KNOWN)).hasValue(meant);
+    }
+
+    @Test
+    void ofEqualsTheOneThatBeginsAlike() {
+        assertThat(NearestName.of("filter-3ph-30a", List.of("filter-1ph-10a", "filter-3ph-42a")))
+                .hasValue("filter-3ph-42a");
     }
 
     @Test

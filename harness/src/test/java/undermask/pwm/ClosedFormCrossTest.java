@@ -75,13 +75,25 @@ class ClosedFormCrossTest {
                 if (amplitude == 0) {
                     continue;
                 }
-                double angle = m * Math.PI - n * leg * 2 * Math.PI / 3;
+                double angle = m * Math.PI - n * leg * 2 * Math.PI / 3 - n * sampleAge(sampling) * 2 * Math.PI / ratio;
                 double sign = line > 0 ? 1 : -1;
                 re[Math.abs(line)] += amplitude / 2 * Math.cos(angle);
                 im[Math.abs(line)] += sign * amplitude / 2 * Math.sin(angle);
             }
         }
         return new double[][] {re, im};
+    }
+
+    /**
+     * By how many carrier periods a sample is older than the books' formulas have it: they place it in the middle of
+     * the time that it serves, here it is taken at the start.
+     */
+    private static double sampleAge(CarrierSampling sampling) {
+        return switch (sampling) {
+            case NATURAL -> 0;
+            case ONCE -> 0.5;
+            case TWICE -> 0.25;
+        };
     }
 
     private static double amplitude(CarrierSampling sampling, double index, int ratio, int m, int n) {
