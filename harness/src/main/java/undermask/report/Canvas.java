@@ -66,7 +66,7 @@ final class Canvas {
     static Picture stacked(List<XYChart> charts) {
         int height = charts.stream().mapToInt(XYChart::getHeight).sum();
         BufferedImage image =
-                new BufferedImage((int) (SCALE * WIDTH), (int) (SCALE * height), BufferedImage.TYPE_INT_RGB);
+                new BufferedImage((int) (SCALE * WIDTH), (int) (SCALE * height), BufferedImage.TYPE_3BYTE_BGR);
         Graphics2D pixels = image.createGraphics();
         pixels.scale(SCALE, SCALE);
         pixels.setRenderingHint(RenderingHints.KEY_ANTIALIASING, RenderingHints.VALUE_ANTIALIAS_ON);

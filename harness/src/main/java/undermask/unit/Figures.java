@@ -3,10 +3,11 @@ package undermask.unit;
 import java.math.BigDecimal;
 import java.math.MathContext;
 import java.math.RoundingMode;
-import java.util.Locale;
 
 /** Numbers as text, rounded once and independent of the locale. */
 public final class Figures {
+    private static final double LARGEST_EXACT = 1L << 53;
+
     private Figures() {}
 
     /**
@@ -48,11 +49,31 @@ public final class Figures {
                 .toPlainString();
     }
 
-    /** A number with a fixed count of decimals, never {@code -0.0}: {@code 12.3}. */
+    /** A number with a fixed count of decimals, ties rounded to even, never {@code -0.0}: {@code 12.3}. */
     public static String fixed(double value, int decimals) {
-        String text = String.format(Locale.ROOT, "%." + decimals + "f", value);
-        boolean zero = text.chars().allMatch(c -> c == '-' || c == '0' || c == '.');
-        return zero && text.startsWith("-") ? text.substring(1) : text;
+        long scale = 1;
+        for (int i = 0; i < decimals; i++) {
+            scale *= 10;
+        }
+        double scaled = Math.rint(Math.abs(value) * scale);
+        if (!(scaled < LARGEST_EXACT)) {
+            return Double.isFinite(value)
+                    ? new BigDecimal(value)
+                            .setScale(decimals, RoundingMode.HALF_EVEN)
+                            .toPlainString()
+                    : Double.toString(value);
+        }
+        long digits = (long) scaled;
+        StringBuilder text = new StringBuilder();
+        if (value < 0 && digits > 0) {
+            text.append('-');
+        }
+        text.append(digits / scale);
+        if (decimals > 0) {
+            String fraction = Long.toString(digits % scale);
+            text.append('.').append("0".repeat(decimals - fraction.length())).append(fraction);
+        }
+        return text.toString();
     }
 
     private static double round(double value, int digits) {
