@@ -46,7 +46,9 @@ public final class WaveformRun {
                 "modulation index   " + Figures.fixed(bridge.modulationIndex(), 4)
                         + (bridge.overmodulated() ? " (beyond the linear range: the reference is clipped)" : ""),
                 "window             " + Figures.withUnit(window.seconds(), Dimension.TIME, 6) + ": "
-                        + window.fundamentalPeriods() + " output periods, " + window.carrierPeriods()
+                        + window.fundamentalPeriods()
+                        + (window.fundamentalPeriods() == 1 ? " output period, " : " output periods, ")
+                        + window.carrierPeriods()
                         + " carrier periods",
                 "carrier            " + Figures.withUnit(window.carrierHz(), Dimension.FREQUENCY, 7) + " (moved by "
                         + Figures.fixed(window.nudgePpm(), 1) + " ppm to fit the window)",
