@@ -1,6 +1,5 @@
 package undermask.cli;
 
-import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.concurrent.Callable;
@@ -32,21 +31,11 @@ final class CheckCommand implements Callable<Integer> {
     @Mixin
     private Main.Folders folders;
 
-    @Option(
-            names = "--reports",
-            paramLabel = "DIR",
-            defaultValue = "reports",
-            description = "Folder of reports (default: ${DEFAULT-VALUE}).")
-    private Path reports;
+    @Mixin
+    private Main.Output output;
 
     @Option(names = "--jobs", paramLabel = "N", description = "Profiles checked at a time (default: the cores).")
     private Integer jobs;
-
-    @Option(names = "--quiet", description = "Print nothing but refusals and faults.")
-    private boolean quiet;
-
-    @Option(names = "--no-charts", description = "Leave the charts out.")
-    private boolean noCharts;
 
     @Parameters(
             paramLabel = "PROFILE",
@@ -67,11 +56,12 @@ final class CheckCommand implements Callable<Integer> {
         ProfileFolder folder = new ProfileFolder(folders.profiles);
         List<Profile> read = profiles.isEmpty() ? folder.readAll() : folder.read(profiles);
         int workers = jobs == null ? Runtime.getRuntime().availableProcessors() : jobs;
-        List<Outcome> outcomes =
-                new CheckRun(new ReportFolder(reports), workers, !noCharts, console.err()::println).of(read);
-        if (!quiet) {
+        List<Outcome> outcomes = new CheckRun(
+                        new ReportFolder(output.reports), workers, !output.noCharts, console.err()::println)
+                .of(read);
+        if (!output.quiet) {
             console.out().print(new Summary(outcomes).console(console.colour()));
-            console.out().println("reports: " + reports);
+            console.out().println("reports: " + output.reports);
         }
         return outcomes.stream().allMatch(Outcome::passes) ? Main.CLEAR : Main.NOT_PASSED;
     }

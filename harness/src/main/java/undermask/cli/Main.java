@@ -3,6 +3,7 @@ package undermask.cli;
 import java.io.PrintStream;
 import java.io.PrintWriter;
 import java.nio.charset.StandardCharsets;
+import java.nio.file.Path;
 import picocli.CommandLine;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Model.CommandSpec;
@@ -108,6 +109,22 @@ public final class Main implements Runnable {
                 paramLabel = "DIR",
                 defaultValue = "profiles",
                 description = "Folder of profiles (default: ${DEFAULT-VALUE}).")
-        java.nio.file.Path profiles;
+        Path profiles;
+    }
+
+    /** What every command knows that writes reports. */
+    static final class Output {
+        @CommandLine.Option(
+                names = "--reports",
+                paramLabel = "DIR",
+                defaultValue = "reports",
+                description = "Folder of reports (default: ${DEFAULT-VALUE}).")
+        Path reports;
+
+        @CommandLine.Option(names = "--quiet", description = "Print nothing but refusals and faults.")
+        boolean quiet;
+
+        @CommandLine.Option(names = "--no-charts", description = "Leave the charts out.")
+        boolean noCharts;
     }
 }

@@ -1,6 +1,5 @@
 package undermask.cli;
 
-import java.nio.file.Path;
 import java.util.List;
 import java.util.concurrent.Callable;
 import picocli.CommandLine;
@@ -29,12 +28,8 @@ final class WaveformCommand implements Callable<Integer> {
     @Mixin
     private Main.Folders folders;
 
-    @Option(
-            names = "--reports",
-            paramLabel = "DIR",
-            defaultValue = "reports",
-            description = "Folder of reports (default: ${DEFAULT-VALUE}).")
-    private Path reports;
+    @Mixin
+    private Main.Output output;
 
     @Option(
             names = "--point",
@@ -42,12 +37,6 @@ final class WaveformCommand implements Callable<Integer> {
             defaultValue = "1",
             description = "Operating point, counted from 1 (default: ${DEFAULT-VALUE}).")
     private int point;
-
-    @Option(names = "--quiet", description = "Print nothing but refusals and faults.")
-    private boolean quiet;
-
-    @Option(names = "--no-charts", description = "Leave the charts out.")
-    private boolean noCharts;
 
     @Parameters(paramLabel = "PROFILE", description = "Name of a profile, or path of a CSV file.")
     private String profile;
@@ -66,11 +55,11 @@ final class WaveformCommand implements Callable<Integer> {
                     "--point is " + point + "; " + read.name() + " has points 1 to "
                             + read.points().size());
         }
-        List<String> said = new WaveformRun(new ReportFolder(reports), !noCharts, console.err()::println)
+        List<String> said = new WaveformRun(new ReportFolder(output.reports), !output.noCharts, console.err()::println)
                 .of(read, read.points().get(point - 1));
-        if (!quiet) {
+        if (!output.quiet) {
             said.forEach(console.out()::println);
-            console.out().println("reports: " + reports.resolve(read.name()));
+            console.out().println("reports: " + output.reports.resolve(read.name()));
         }
         return Main.CLEAR;
     }
