@@ -20,11 +20,15 @@ import undermask.check.Check;
 import undermask.check.Policy;
 import undermask.check.Profile;
 import undermask.check.ProfileResult;
+import undermask.drive.Carrier;
 import undermask.drive.CarrierSampling;
 import undermask.drive.DriveSettings;
 import undermask.drive.EdgeForm;
+import undermask.drive.Edges;
 import undermask.drive.Modulation;
+import undermask.drive.ModulationPlan;
 import undermask.drive.OperatingPoint;
+import undermask.drive.Switching;
 import undermask.drive.VoltageCurve;
 import undermask.installation.CablePart;
 import undermask.installation.Capacitor;
@@ -57,14 +61,11 @@ public class WholeCheck {
     @Setup
     public void takeProfile() {
         DriveSettings settings = new DriveSettings(
-                carrierHz,
-                Modulation.SPACE_VECTOR,
-                CarrierSampling.TWICE,
-                1e-6,
-                5e9,
-                3e9,
-                EdgeForm.EXPONENTIAL,
-                new VoltageCurve(400, 50, 0),
+                Carrier.fixed(carrierHz, CarrierSampling.TWICE),
+                ModulationPlan.of(Modulation.SPACE_VECTOR),
+                Switching.of(1e-6),
+                new Edges(5e9, 3e9, EdgeForm.EXPONENTIAL, 0.3, 11.6, 0.3e-9, Optional.empty(), Optional.empty()),
+                new VoltageCurve(380, 50, 0),
                 OptionalDouble.empty());
         FilterPart filter = new FilterPart(
                 "three-phase",
@@ -79,7 +80,7 @@ public class WholeCheck {
                 8e3,
                 "typical");
         CablePart lead = new CablePart("shielded", 250e-12, 150e-9, 0.05, 1e6, 0.02, "typical");
-        MotorPart motor = new MotorPart("4 kW", 4e3, 0.3e-9, 3e-9, 2e-3, 4e3, 5, "typical");
+        MotorPart motor = new MotorPart("4 kW", 4e3, 0.3e-9, 3e-9, 2e-3, 4e3, 5, 22e-3, "typical");
         Installation installation = new Installation(
                 "bench",
                 new Supply(3, 400, 50),

@@ -37,7 +37,7 @@ public final class Check {
     }
 
     private static PointResult at(OperatingPoint point, Profile profile, InstallationNetwork network) {
-        Bridge bridge = Bridge.switching(profile.settings(), point, profile.linkVoltage());
+        Bridge bridge = Bridge.switching(profile.settings(), point, profile.link(point), profile.load());
         EdgeTrain edges = bridge.commonMode();
         Lines source = edges.lines();
         Trace worst = null;

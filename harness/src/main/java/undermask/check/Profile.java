@@ -9,6 +9,8 @@ import undermask.drive.OperatingPoint;
 import undermask.installation.Installation;
 import undermask.mask.Mask;
 import undermask.pwm.Bridge;
+import undermask.pwm.LinkVoltage;
+import undermask.pwm.OutputLoad;
 import undermask.unit.Place;
 
 /**
@@ -52,8 +54,9 @@ public record Profile(
         if (Set.copyOf(points).size() < points.size()) {
             throw new IllegalArgumentException("two operating points are alike");
         }
-        double link = linkVoltage(settings, installation);
-        points.forEach(point -> Bridge.refuseImpossible(settings, point, link));
+        for (OperatingPoint point : points) {
+            Bridge.refuseImpossible(settings, point, link(settings, installation, point));
+        }
     }
 
     /** Where a quantity stands, or the file when it was left to its default. */
@@ -61,12 +64,30 @@ public record Profile(
         return places.getOrDefault(quantity, places.get(FILE));
     }
 
-    /** Mean voltage of the DC link in V: as set, else from the supply at light load. */
-    public double linkVoltage() {
-        return linkVoltage(settings, installation);
+    /** The DC link at a point: as set, else as supply, capacitor and load leave it. */
+    public LinkVoltage link(OperatingPoint point) {
+        return link(settings, installation, point);
     }
 
-    private static double linkVoltage(DriveSettings settings, Installation installation) {
-        return settings.linkVoltage().orElseGet(() -> installation.supply().lightLoadLinkVoltage());
+    private static LinkVoltage link(DriveSettings settings, Installation installation, OperatingPoint point) {
+        if (settings.linkVoltage().isPresent()) {
+            return LinkVoltage.constant(settings.linkVoltage().getAsDouble());
+        }
+        double power = Math.sqrt(3)
+                * settings.voltageCurve().lineVoltage(point.outputHz())
+                * point.loadCurrentRms()
+                * point.displacementPowerFactor();
+        return LinkVoltage.rectified(
+                installation.supply().pulses(),
+                installation.supply().lightLoadLinkVoltage(),
+                installation.supply().frequencyHz(),
+                installation.link().capacitor().capacitance(),
+                power);
+    }
+
+    /** What hangs on the bridge's output. */
+    public OutputLoad load() {
+        return new OutputLoad(
+                installation.phaseInductance(), settings.edges().outputCapacitance() + installation.legCapacitance());
     }
 }

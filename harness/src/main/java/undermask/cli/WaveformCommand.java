@@ -20,6 +20,8 @@ import undermask.report.WaveformRun;
         description = "Writes the waveforms of a profile and their line spectra.%n",
         mixinStandardHelpOptions = true)
 final class WaveformCommand implements Callable<Integer> {
+    private static final int MOST_SAMPLES = 10_000_000;
+
     private final Main.Console console;
 
     @Spec
@@ -38,6 +40,13 @@ final class WaveformCommand implements Callable<Integer> {
             description = "Operating point, counted from 1 (default: ${DEFAULT-VALUE}).")
     private int point;
 
+    @Option(
+            names = "--samples",
+            paramLabel = "N",
+            defaultValue = "0",
+            description = "Also write N samples of one output period (default: none).")
+    private int samples;
+
     @Parameters(paramLabel = "PROFILE", description = "Name of a profile, or path of a CSV file.")
     private String profile;
 
@@ -55,8 +64,12 @@ final class WaveformCommand implements Callable<Integer> {
                     "--point is " + point + "; " + read.name() + " has points 1 to "
                             + read.points().size());
         }
+        if (samples < 0 || samples > MOST_SAMPLES) {
+            throw new CommandLine.ParameterException(
+                    spec.commandLine(), "--samples is " + samples + "; allowed: 1 to " + MOST_SAMPLES);
+        }
         List<String> said = new WaveformRun(new ReportFolder(output.reports), !output.noCharts, console.err()::println)
-                .of(read, read.points().get(point - 1));
+                .of(read, read.points().get(point - 1), samples);
         if (!output.quiet) {
             said.forEach(console.out()::println);
             console.out().println("reports: " + output.reports.resolve(read.name()));

@@ -32,7 +32,7 @@ record Parts(PartTable<FilterPart> filters, PartTable<CablePart> cables, PartTab
     private static final List<String> CABLE =
             columns("name,capacitance,inductance,resistance,resistance frequency,loss factor,source");
     private static final List<String> MOTOR = columns("name,rated power,terminal capacitance,star capacitance,"
-            + "winding inductance,winding resistance,frame resistance,source");
+            + "winding inductance,winding resistance,frame resistance,leakage inductance,source");
 
     /**
      * Reads the built-in tables and those of some folders.
@@ -118,6 +118,7 @@ record Parts(PartTable<FilterPart> filters, PartTable<CablePart> cables, PartTab
                 row.number("winding inductance", INDUCTANCE, 1e-6, 1),
                 row.number("winding resistance", RESISTANCE, 1, 10e6),
                 row.number("frame resistance", RESISTANCE, 0.01, 10e3),
+                row.number("leakage inductance", INDUCTANCE, 1e-6, 10),
                 row.text("source"));
     }
 }

@@ -7,12 +7,8 @@ import java.util.Map;
 import java.util.Optional;
 import undermask.check.Policy;
 import undermask.check.Profile;
-import undermask.drive.CarrierSampling;
 import undermask.drive.DriveSettings;
-import undermask.drive.EdgeForm;
-import undermask.drive.Modulation;
 import undermask.drive.OperatingPoint;
-import undermask.drive.VoltageCurve;
 import undermask.installation.Installation;
 import undermask.mask.Mask;
 import undermask.unit.Place;
@@ -35,8 +31,12 @@ final class ProfileFile {
             return Optional.empty();
         }
         QuantityTable rows = table.get();
-        Optional<DriveSettings> settings = settings(rows);
         List<OperatingPoint> points = points(rows);
+        double largest = points.stream()
+                .mapToDouble(OperatingPoint::loadCurrentRms)
+                .max()
+                .orElse(0);
+        Optional<DriveSettings> settings = DriveRows.settings(rows, largest);
         Optional<Installation> installation = rows.word(
                         "installation", "must name a file of the folder " + Shelf.INSTALLATIONS)
                 .flatMap(shelf::installation);
@@ -52,29 +52,6 @@ final class ProfileFile {
         return rows.record(
                 OperatingPoint.OUTPUT.quantity(),
                 () -> new Profile(name, settings.get(), points, installation.get(), mask.get(), policy.get(), places));
-    }
-
-    private static Optional<DriveSettings> settings(QuantityTable rows) {
-        Optional<VoltageCurve> curve = rows.record(
-                VoltageCurve.BOOST.quantity(),
-                () -> new VoltageCurve(
-                        rows.number(VoltageCurve.BASE_VOLTAGE),
-                        rows.number(VoltageCurve.BASE_FREQUENCY),
-                        rows.number(VoltageCurve.BOOST, 0)));
-        return rows.record(DriveSettings.DEAD_TIME.quantity(), () -> {
-            double rising = rows.number(DriveSettings.SLEW_RISING);
-            return new DriveSettings(
-                    rows.number(DriveSettings.CARRIER),
-                    rows.choice("modulation", Modulation.class),
-                    // most drives sample at both peaks of the carrier
-                    rows.choice("carrier sampling", CarrierSampling.class, CarrierSampling.TWICE),
-                    rows.number(DriveSettings.DEAD_TIME),
-                    rising,
-                    rows.number(DriveSettings.SLEW_FALLING, rising),
-                    rows.choice("edge shape", EdgeForm.class, EdgeForm.EXPONENTIAL),
-                    rows.built(curve),
-                    rows.optional(DriveSettings.LINK_VOLTAGE));
-        });
     }
 
     /** The operating points: a list has a value for each, a single value holds for all. */

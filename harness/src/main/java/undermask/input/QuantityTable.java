@@ -255,6 +255,11 @@ final class QuantityTable {
         }
     }
 
+    /** Whether the file has a row for a quantity, right or wrong. */
+    boolean gives(String quantity) {
+        return has(quantity);
+    }
+
     private boolean has(String quantity) {
         asked.add(quantity);
         return rows.containsKey(quantity);

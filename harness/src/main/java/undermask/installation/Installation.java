@@ -35,6 +35,8 @@ public record Installation(
     public static final Range MOTOR_LEAD_LENGTH = new Range("motor lead length", Dimension.LENGTH, 0.1, 300);
     public static final Range FRAME_BOND = new Range("motor frame bond inductance", Dimension.INDUCTANCE, 1e-9, 100e-6);
 
+    private static final int MOTOR_PHASES = 3;
+
     /** Builds an installation; ranges hold and the filter fits the supply. */
     public Installation {
         Objects.requireNonNull(name);
@@ -53,5 +55,20 @@ public record Installation(
                         + "-phase mains, the supply has " + supply.phases());
             }
         });
+    }
+
+    /** What the current of a bridge leg has to charge outside the drive's switches: heatsink, lead and motor, F. */
+    public double legCapacitance() {
+        return heatsinkCapacitance
+                + motorLead.capacitance() * motorLeadLength / MOTOR_PHASES
+                + motor.terminalCapacitance();
+    }
+
+    /**
+     * Leakage inductance of a motor phase as connected, star circuit, H. The catalogue's motors are for 400 V in star; a
+     * drive on single-phase mains feeds them in delta.
+     */
+    public double phaseInductance() {
+        return supply.phases() == 1 ? motor.leakageInductance() / MOTOR_PHASES : motor.leakageInductance();
     }
 }

@@ -13,6 +13,7 @@ import java.util.Objects;
  * @param windingInductance common-mode inductance of the three windings together in H
  * @param windingResistance in parallel to it, ohm
  * @param frameResistance in series with the terminal capacitances together, ohm (lamination and frame)
+ * @param leakageInductance of stator and rotor together, per phase of the star circuit, H
  * @param source where the values come from
  */
 public record MotorPart(
@@ -23,13 +24,20 @@ public record MotorPart(
         double windingInductance,
         double windingResistance,
         double frameResistance,
+        double leakageInductance,
         String source) {
     /** Builds a part of positive, finite values. */
     public MotorPart {
         Objects.requireNonNull(name);
         Objects.requireNonNull(source);
         for (double value : new double[] {
-            ratedPower, terminalCapacitance, starCapacitance, windingInductance, windingResistance, frameResistance
+            ratedPower,
+            terminalCapacitance,
+            starCapacitance,
+            windingInductance,
+            windingResistance,
+            frameResistance,
+            leakageInductance
         }) {
             if (!(value > 0) || Double.isInfinite(value)) {
                 throw new IllegalArgumentException("motor " + name + " has a value of " + value);

@@ -28,6 +28,11 @@ public record Supply(int phases, double voltage, double frequencyHz) {
         return phases == 1 ? 2 : 3;
     }
 
+    /** Half-waves per mains period behind an uncontrolled bridge. */
+    public int pulses() {
+        return phases == 1 ? 2 : 6;
+    }
+
     /** Voltage of a link charged by this supply at light load: √2 times the rectified rms voltage, V. */
     public double lightLoadLinkVoltage() {
         return Math.sqrt(2) * voltage;

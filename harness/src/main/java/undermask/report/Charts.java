@@ -5,7 +5,6 @@ import java.awt.Color;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
-import java.util.OptionalDouble;
 import java.util.TreeMap;
 import org.knowm.xchart.XYChart;
 import org.knowm.xchart.XYSeries;
@@ -16,8 +15,6 @@ import undermask.mask.LimitSegment;
 import undermask.mask.Mask;
 import undermask.receiver.Detector;
 import undermask.receiver.Trace;
-import undermask.signal.EdgeShape;
-import undermask.signal.EdgeTrain;
 
 /** The charts of a profile. */
 final class Charts {
@@ -112,75 +109,7 @@ final class Charts {
         return y.stream().mapToDouble(Double::doubleValue).max().orElseThrow();
     }
 
-    /** Line-to-line and common-mode voltage over one output period, and one edge of the common mode. */
-    static Picture waveform(String title, EdgeTrain lineToLine, EdgeTrain commonMode, double outputHz) {
-        XYChart line = Canvas.chart(title, "time in ms", "line to line in V", 300);
-        addSteps(line, "line to line", lineToLine, 1 / outputHz, COLOURS.get(Detector.AVERAGE));
-        XYChart common = Canvas.chart("", "time in ms", "common mode in V", 280);
-        addSteps(common, "common mode", commonMode, 1 / outputHz, COLOURS.get(Detector.QUASI_PEAK));
-        List<XYChart> charts = new ArrayList<>(List.of(line, common));
-        steepest(lineToLine).ifPresent(edge -> charts.add(edge(lineToLine, (int) edge)));
-        charts.forEach(chart -> chart.getStyler().setLegendVisible(false));
-        return Canvas.stacked(charts);
-    }
-
-    private static void addSteps(XYChart chart, String name, EdgeTrain train, double span, Color colour) {
-        List<Double> x = new ArrayList<>(List.of(0.0));
-        double level = train.initialLevel();
-        List<Double> y = new ArrayList<>(List.of(level));
-        for (int e = 0; e < train.size() && train.time(e) < span; e++) {
-            x.addAll(List.of(1e3 * train.time(e), 1e3 * train.time(e)));
-            y.addAll(List.of(level, level + train.step(e)));
-            level += train.step(e);
-        }
-        x.add(1e3 * span);
-        y.add(level);
-        dress(chart.addSeries(name, x, y), colour, TRACE);
-        chart.getStyler().setYAxisDecimalPattern("0");
-        chart.getStyler().setXAxisMin(0.0);
-        chart.getStyler().setXAxisMax(1e3 * span);
-    }
-
-    /** The first rising edge with the shortest transition. */
-    private static OptionalDouble steepest(EdgeTrain train) {
-        int best = -1;
-        for (int e = 0; e < train.size(); e++) {
-            if (train.step(e) > 0
-                    && (best < 0
-                            || train.shape(e).transitionTime()
-                                    < train.shape(best).transitionTime())) {
-                best = e;
-            }
-        }
-        return best < 0 ? OptionalDouble.empty() : OptionalDouble.of(best);
-    }
-
-    private static XYChart edge(EdgeTrain train, int edge) {
-        EdgeShape shape = train.shape(edge);
-        double from = train.initialLevel();
-        for (int e = 0; e < edge; e++) {
-            from += train.step(e);
-        }
-        double reach = 50e-9 * Math.max(1, Math.ceil(2 * shape.transitionTime() / 50e-9));
-        int points = 400;
-        double[] x = new double[points];
-        double[] y = new double[points];
-        for (int i = 0; i < points; i++) {
-            double place = 2.0 * i / (points - 1) - 1;
-            // denser around the instant
-            double time = reach * place * (0.2 + 0.8 * place * place);
-            x[i] = 1e9 * time;
-            y[i] = from + train.step(edge) * shape.response(time);
-        }
-        XYChart chart = Canvas.chart("", "time in ns around the edge", "line to line in V", 280);
-        chart.getStyler().setXAxisDecimalPattern("0");
-        chart.getStyler().setXAxisMin(x[0]);
-        chart.getStyler().setXAxisMax(x[points - 1]);
-        dress(chart.addSeries("edge", x, y), COLOURS.get(Detector.AVERAGE), new BasicStroke(2f));
-        return chart;
-    }
-
-    private static void dress(XYSeries series, Color colour, BasicStroke stroke) {
+    static void dress(XYSeries series, Color colour, BasicStroke stroke) {
         series.setMarker(SeriesMarkers.NONE);
         series.setLineColor(colour);
         series.setLineStyle(stroke);

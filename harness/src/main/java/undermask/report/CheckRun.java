@@ -90,20 +90,13 @@ public final class CheckRun {
                         result.envelope(),
                         profile.mask(),
                         result.judgements()));
-        waveform(folder, charts, profile.name(), result.points().get(0));
-        return outcome;
-    }
-
-    private static void waveform(ReportFolder folder, ChartMaker charts, String name, PointResult point)
-            throws IOException {
+        PointResult first = result.points().get(0);
         charts.draw(
                 folder,
-                name,
+                profile.name(),
                 "waveform",
-                () -> Charts.waveform(
-                        name + ", " + point.point().label(),
-                        point.bridge().lineToLine(),
-                        point.bridge().commonMode(),
-                        point.point().outputHz()));
+                () -> WaveformCharts.waveform(
+                        profile.name() + ", " + first.point().label(), first.bridge()));
+        return outcome;
     }
 }

@@ -2,7 +2,8 @@ package undermask.report;
 
 import java.util.List;
 import undermask.check.Profile;
-import undermask.drive.DriveSettings;
+import undermask.drive.Carrier;
+import undermask.drive.Edges;
 import undermask.mask.Judgement;
 import undermask.unit.Dimension;
 import undermask.unit.Figures;
@@ -45,7 +46,7 @@ public final class Finding {
                         + order(outcome, judgement) + "), limit " + level(judgement.limitDbuv()),
                 "  mask " + profile().mask().name() + ", " + Figures.fixed(judgement.requiredDb(), 1)
                         + " dB margin required",
-                "  worst at " + outcome.pointOf(judgement),
+                "  worst at " + outcome.pointOf(judgement).label(),
                 "  next: " + next());
     }
 
@@ -56,10 +57,13 @@ public final class Finding {
 
     private Place place() {
         return profile()
-                .place(
-                        judgement.frequencyHz() < LEAD_RESONANCES_FROM
-                                ? DriveSettings.CARRIER.quantity()
-                                : DriveSettings.SLEW_RISING.quantity());
+                .place(judgement.frequencyHz() < LEAD_RESONANCES_FROM ? carrierRow() : Edges.SLEW_RISING.quantity());
+    }
+
+    private String carrierRow() {
+        return profile().settings().carrier().synchronous()
+                ? Carrier.MULTIPLE.quantity()
+                : Carrier.FREQUENCY.quantity();
     }
 
     private String next() {
@@ -85,6 +89,6 @@ public final class Finding {
 
     /** The multiple of the carrier nearest to a judgement's frequency: {@code 38 x carrier}. */
     static String order(Outcome outcome, Judgement judgement) {
-        return Math.round(judgement.frequencyHz() / outcome.profile().settings().carrierHz()) + " x carrier";
+        return Math.round(judgement.frequencyHz() / outcome.pointOf(judgement).carrierHz()) + " x carrier";
     }
 }

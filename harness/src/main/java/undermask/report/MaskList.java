@@ -41,14 +41,6 @@ public final class MaskList {
     }
 
     private static void paragraph(StringBuilder text, String words) {
-        String line = " ";
-        for (String word : words.split(" ")) {
-            if (line.length() + 1 + word.length() > 80) {
-                text.append(line).append('\n');
-                line = " ";
-            }
-            line += " " + word;
-        }
-        text.append(line).append('\n');
+        Paragraph.append(text, words, "  ", "  ");
     }
 }

@@ -16,8 +16,13 @@ import undermask.receiver.Detector;
  * @param judgements worst frequency of each limited detector over all points
  */
 public record Outcome(Profile profile, List<Point> points, List<Judgement> judgements) {
-    /** An operating point's judgements. */
-    public record Point(String label, List<Judgement> judgements) {
+    /**
+     * What is kept of an operating point.
+     *
+     * @param carrierHz mean carrier frequency there
+     * @param remarks what a drive engineer should know of it, in sentences
+     */
+    public record Point(String label, double carrierHz, List<String> remarks, List<Judgement> judgements) {
         Judgement of(Detector detector) {
             return judgements.stream()
                     .filter(judgement -> judgement.detector() == detector)
@@ -30,7 +35,11 @@ public record Outcome(Profile profile, List<Point> points, List<Judgement> judge
         return new Outcome(
                 result.profile(),
                 result.points().stream()
-                        .map((PointResult point) -> new Point(point.point().label(), point.judgements()))
+                        .map((PointResult point) -> new Point(
+                                point.point().label(),
+                                point.bridge().window().carrierHz(),
+                                point.bridge().remarks(),
+                                point.judgements()))
                         .toList(),
                 result.judgements());
     }
@@ -58,11 +67,10 @@ public record Outcome(Profile profile, List<Point> points, List<Judgement> judge
     }
 
     /** The operating point at which a detector reads worst. */
-    String pointOf(Judgement judgement) {
+    Point pointOf(Judgement judgement) {
         return points.stream()
                 .min(Comparator.comparingDouble(
                         (Point point) -> point.of(judgement.detector()).marginDb()))
-                .orElseThrow()
-                .label();
+                .orElseThrow();
     }
 }

@@ -1,7 +1,10 @@
 package undermask.report;
 
+import java.util.ArrayList;
 import java.util.Comparator;
+import java.util.LinkedHashMap;
 import java.util.List;
+import java.util.Map;
 import undermask.mask.Judgement;
 import undermask.mask.Verdict;
 import undermask.unit.Figures;
@@ -73,11 +76,15 @@ public final class Summary {
                             Figures.fixed(worst.marginDb(), 1) + " dB",
                             worst.detector().words(),
                             Finding.frequency(worst),
-                            outcome.pointOf(worst),
+                            outcome.pointOf(worst).label(),
                             escaped(outcome.profile().mask().name())))
                     .append(" |\n");
         }
-        return text.append('\n').append(counts()).append('\n').toString();
+        notes().forEach(note -> text.append("\n- ").append(escaped(note)));
+        return text.append(notes().isEmpty() ? "\n" : "\n\n")
+                .append(counts())
+                .append('\n')
+                .toString();
     }
 
     private static String escaped(String text) {
@@ -104,7 +111,7 @@ public final class Summary {
                     Figures.fixed(worst.marginDb(), 1) + " dB",
                     worst.detector().words(),
                     Finding.frequency(worst),
-                    outcome.pointOf(worst));
+                    outcome.pointOf(worst).label());
             text.append(colour ? coloured(plain, outcome.verdict()) : plain).append('\n');
         }
         for (Outcome outcome : worstFirst()) {
@@ -113,7 +120,24 @@ public final class Summary {
                     .map(judgement -> new Finding(outcome, judgement).text())
                     .forEach(finding -> text.append('\n').append(finding).append('\n'));
         }
+        notes().forEach(note -> Paragraph.append(text.append('\n'), note, "note: ", "  "));
         return text.append('\n').append(counts()).append('\n').toString();
+    }
+
+    /** What is remarkable about operating points; points of one profile with the same remark share it. */
+    private List<String> notes() {
+        List<String> notes = new ArrayList<>();
+        for (Outcome outcome : outcomes) {
+            Map<String, List<String>> points = new LinkedHashMap<>();
+            for (Outcome.Point point : outcome.points()) {
+                point.remarks()
+                        .forEach(remark -> points.computeIfAbsent(remark, key -> new ArrayList<>())
+                                .add(point.label()));
+            }
+            points.forEach(
+                    (remark, at) -> notes.add(outcome.profile().name() + ", " + String.join(", ", at) + ": " + remark));
+        }
+        return notes;
     }
 
     private static String line(

@@ -4,7 +4,7 @@ package undermask.signal;
  * The shape of a step between two levels. Each shape is placed so that its centre of gravity in time is the instant of
  * the edge; the shape then changes no volt-seconds and no low harmonic.
  */
-public sealed interface EdgeShape permits IdealEdge, RampEdge, RaisedCosineEdge, ExponentialEdge {
+public sealed interface EdgeShape permits IdealEdge, RampEdge, RaisedCosineEdge, ExponentialEdge, RingingEdge {
     /**
      * The spectrum factor E(f), the Fourier transform of the edge's derivative, 1 at f = 0. Time counts from the origin
      * of the shape, {@link #lead()} before the instant of the edge.
@@ -25,6 +25,11 @@ public sealed interface EdgeShape permits IdealEdge, RampEdge, RaisedCosineEdge,
      * @param time from the instant of the edge, s
      */
     double response(double time);
+
+    /** Time from the instant of the edge, before and after it, beyond which it has no more to do, s. */
+    default double reach() {
+        return 8 * transitionTime();
+    }
 
     /** Transition time between the rails in s: ΔV divided by dv/dt. */
     double transitionTime();

@@ -16,6 +16,11 @@ public record Range(String quantity, Dimension dimension, double low, double hig
         }
     }
 
+    /** The same interval under another name. */
+    public Range named(String other) {
+        return new Range(other, dimension, low, high);
+    }
+
     public boolean contains(double value) {
         return value >= low && value <= high;
     }

@@ -18,11 +18,15 @@ import org.hipparchus.ode.sampling.ODEStateInterpolator;
 import org.hipparchus.ode.sampling.ODEStepHandler;
 import org.jtransforms.fft.DoubleFFT_1D;
 import org.junit.jupiter.api.Test;
+import undermask.drive.Carrier;
 import undermask.drive.CarrierSampling;
 import undermask.drive.DriveSettings;
 import undermask.drive.EdgeForm;
+import undermask.drive.Edges;
 import undermask.drive.Modulation;
+import undermask.drive.ModulationPlan;
 import undermask.drive.OperatingPoint;
+import undermask.drive.Switching;
 import undermask.drive.VoltageCurve;
 import undermask.installation.CablePart;
 import undermask.installation.Capacitor;
@@ -35,6 +39,8 @@ import undermask.installation.Supply;
 import undermask.network.InstallationNetwork;
 import undermask.network.MainsNetwork;
 import undermask.pwm.Bridge;
+import undermask.pwm.LinkVoltage;
+import undermask.pwm.OutputLoad;
 import undermask.signal.EdgeTrain;
 import undermask.signal.Lines;
 
@@ -83,22 +89,20 @@ class WholeWayCrossTest {
                 80e-12,
                 lead,
                 5,
-                new MotorPart("motor of 0.75 kW", 750, 111e-12, 996e-12, 3.14e-3, 2270, 11.5, "generic"),
+                new MotorPart("motor of 0.75 kW", 750, 111e-12, 996e-12, 3.14e-3, 2270, 11.5, 0.113, "generic"),
                 OptionalDouble.of(1e-6));
     }
 
     private static EdgeTrain commonMode() {
         DriveSettings settings = new DriveSettings(
-                CARRIER,
-                Modulation.SPACE_VECTOR,
-                CarrierSampling.TWICE,
-                1e-6,
-                4e9,
-                3e9,
-                EdgeForm.RAMP,
+                Carrier.fixed(CARRIER, CarrierSampling.TWICE),
+                ModulationPlan.of(Modulation.SPACE_VECTOR),
+                Switching.of(1e-6),
+                Edges.of(4e9, 3e9, EdgeForm.RAMP),
                 new VoltageCurve(180, 50, 10),
                 OptionalDouble.of(325));
-        return Bridge.switching(settings, new OperatingPoint(500, 2.5, 0.8), 325)
+        return Bridge.switching(
+                        settings, new OperatingPoint(500, 2.5, 0.8), LinkVoltage.constant(325), OutputLoad.IDEAL)
                 .commonMode();
     }
 

@@ -23,7 +23,9 @@ class OtherCommandsTest {
         assertThat(run.err()).isEmpty();
         assertThat(run.status()).isZero();
         List<String> steps = Files.readAllLines(folder.resolve("reports/pump/waveform.csv"));
-        assertThat(steps.get(0)).isEqualTo("time_s,leg_a_v,leg_b_v,leg_c_v,line_to_line_v,common_mode_v");
+        assertThat(steps.get(0))
+                .isEqualTo(
+                        "time_s,leg_a_v,leg_b_v,leg_c_v,line_to_line_v,common_mode_v,current_a_a,current_b_a,current_c_a,link_current_a");
         for (String row : steps.subList(1, steps.size())) {
             double[] cells = Arrays.stream(row.split(","))
                     .mapToDouble(Double::parseDouble)

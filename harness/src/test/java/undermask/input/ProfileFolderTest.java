@@ -2,6 +2,7 @@ package undermask.input;
 
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.catchThrowableOfType;
+import static org.assertj.core.api.Assertions.within;
 import static org.assertj.core.api.Assumptions.assumeThat;
 
 import java.io.IOException;
@@ -11,7 +12,9 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.Arrays;
 import java.util.List;
+import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.OptionalInt;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
@@ -19,11 +22,21 @@ import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.ValueSource;
 import undermask.check.Policy;
 import undermask.check.Profile;
+import undermask.drive.Carrier;
 import undermask.drive.CarrierSampling;
 import undermask.drive.DriveSettings;
 import undermask.drive.EdgeForm;
+import undermask.drive.Edges;
 import undermask.drive.Modulation;
+import undermask.drive.ModulationPlan;
 import undermask.drive.OperatingPoint;
+import undermask.drive.Overmodulation;
+import undermask.drive.ReducedCarrier;
+import undermask.drive.Ringing;
+import undermask.drive.ShortPulses;
+import undermask.drive.Spread;
+import undermask.drive.SpreadForm;
+import undermask.drive.Switching;
 import undermask.drive.VoltageCurve;
 import undermask.installation.CablePart;
 import undermask.installation.Capacitor;
@@ -71,13 +84,28 @@ class ProfileFolderTest {
 
         assertThat(conveyor.settings())
                 .isEqualTo(new DriveSettings(
-                        8000,
-                        Modulation.SINE_TRIANGLE,
-                        CarrierSampling.NATURAL,
-                        1.5e-6,
-                        5e9,
-                        3.5e9,
-                        EdgeForm.RAISED_COSINE,
+                        new Carrier(
+                                OptionalDouble.of(8000),
+                                OptionalInt.empty(),
+                                Optional.of(new ReducedCarrier(4000, OptionalDouble.of(6), OptionalDouble.of(8))),
+                                CarrierSampling.NATURAL,
+                                new Spread(SpreadForm.TRIANGLE, 500, 40, 1)),
+                        new ModulationPlan(
+                                Modulation.SINE_TRIANGLE,
+                                Overmodulation.CLIPPED,
+                                Optional.of(Modulation.CLAMP_60_LAG),
+                                OptionalDouble.of(30),
+                                OptionalDouble.of(300)),
+                        new Switching(1.5e-6, true, 3e-6, ShortPulses.HOLD, 100e-9, 150e-9),
+                        new Edges(
+                                5e9,
+                                3.5e9,
+                                EdgeForm.RAISED_COSINE,
+                                0.4,
+                                9,
+                                500e-12,
+                                Optional.of(new Ringing(8e6, 0.1, 0.2)),
+                                Optional.of(new Ringing(6e6, 0.2, 0.1))),
                         new VoltageCurve(400, 50, 12),
                         OptionalDouble.of(560)));
         assertThat(conveyor.points())
@@ -125,9 +153,14 @@ class ProfileFolderTest {
         Profile pump = read("brine-pump");
         Installation plant = pump.installation();
 
-        assertThat(pump.settings().sampling()).isEqualTo(CarrierSampling.TWICE);
-        assertThat(pump.settings().slewFalling()).isEqualTo(4e9);
-        assertThat(pump.settings().edgeForm()).isEqualTo(EdgeForm.EXPONENTIAL);
+        assertThat(pump.settings().carrier().sampling()).isEqualTo(CarrierSampling.TWICE);
+        assertThat(pump.settings().edges().slewFalling()).isEqualTo(4e9);
+        assertThat(pump.settings().edges().form()).isEqualTo(EdgeForm.EXPONENTIAL);
+        assertThat(pump.settings().edges().referenceCurrent()).isCloseTo(8 * Math.sqrt(2), within(1e-12));
+        assertThat(pump.settings().edges().ringingFalling()).isEmpty();
+        assertThat(pump.settings().carrier().spread().none()).isTrue();
+        assertThat(pump.settings().switching()).isEqualTo(Switching.of(2e-6));
+        assertThat(pump.settings().modulation()).isEqualTo(ModulationPlan.of(Modulation.SPACE_VECTOR));
         assertThat(pump.settings().voltageCurve().boost()).isZero();
         assertThat(pump.settings().linkVoltage()).isEmpty();
         assertThat(pump.points()).extracting(OperatingPoint::outputHz).containsExactly(10.0, 25.0, 50.0);
@@ -333,7 +366,7 @@ class ProfileFolderTest {
         Files.write(folder.resolve("dock-conveyor.csv"), text.getBytes(StandardCharsets.ISO_8859_1));
         assertThat(told("dock-conveyor"))
                 .containsExactly(
-                        "FOLDER/dock-conveyor.csv:4:12: \"sine\", modulation must be sine-triangle or space-vector",
+                        "FOLDER/dock-conveyor.csv:4:12: \"sine\", modulation must be sine-triangle or third-harmonic-1/6 or third-harmonic-1/4 or space-vector or clamp-60 or clamp-60-lead or clamp-60-lag or clamp-30 or clamp-120-upper or clamp-120-lower",
                         "FOLDER/dock-conveyor.csv:7:15: a byte here is no UTF-8; save the file as UTF-8");
 
         Files.write(folder.resolve("dock-conveyor.csv"), ("\uFEFF" + text).getBytes(StandardCharsets.UTF_16LE));

@@ -87,6 +87,7 @@ final class Parts {
                 si(row.get("winding inductance")),
                 si(row.get("winding resistance")),
                 si(row.get("frame resistance")),
+                si(row.get("leakage inductance")),
                 row.get("source"));
     }
 

@@ -68,10 +68,9 @@ class BridgeLawTest {
     void legsStayBetweenTheRails() {
         for (double index : new double[] {0.15, 0.6, 1.1, 1.27}) {
             for (CarrierSampling sampling : CarrierSampling.values()) {
-                Bridge bridge = Bridge.switching(
+                Bridge bridge = Bridges.switched(
                         Bridges.settings(4000, Modulation.SPACE_VECTOR, sampling, 3e-6, index),
-                        new OperatingPoint(Bridges.OUTPUT, 4, 0.4),
-                        Bridges.LINK);
+                        new OperatingPoint(Bridges.OUTPUT, 4, 0.4));
                 for (int k = 0; k < 3; k++) {
                     EdgeTrain leg = bridge.leg(k);
                     double level = leg.initialLevel();
@@ -88,7 +87,7 @@ class BridgeLawTest {
     @ParameterizedTest(name = "{0} Hz carrier at {1} Hz output")
     @CsvSource({"4000, 50", "4000, 47", "8000, 33.3", "2000, 7"})
     void windowHoldsWholePeriodsAndNudgesLittle(double carrier, double output) {
-        AnalysisWindow window = AnalysisWindow.of(carrier, output);
+        AnalysisWindow window = AnalysisWindow.of(carrier, output, 0);
         assertThat(Math.abs(window.nudgePpm())).isLessThanOrEqualTo(100);
         assertThat(window.carrierHz() * window.seconds()).isCloseTo(window.carrierPeriods(), within(1e-6));
         assertThat(window.seconds() * output).isCloseTo(window.fundamentalPeriods(), within(1e-9));
@@ -101,7 +100,7 @@ class BridgeLawTest {
 
     @Test
     void refusesWhatNoBridgeCanDo() {
-        assertThatThrownBy(() -> AnalysisWindow.of(4000, 700))
+        assertThatThrownBy(() -> AnalysisWindow.refuseSlowCarrier(4000, 700))
                 .hasMessageContaining("below six times the output frequency");
         assertThatThrownBy(() -> Bridges.without(Modulation.SPACE_VECTOR, CarrierSampling.TWICE, 80, 1.3))
                 .hasMessageContaining("six-step");

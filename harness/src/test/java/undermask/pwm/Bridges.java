@@ -1,11 +1,15 @@
 package undermask.pwm;
 
 import java.util.OptionalDouble;
+import undermask.drive.Carrier;
 import undermask.drive.CarrierSampling;
 import undermask.drive.DriveSettings;
 import undermask.drive.EdgeForm;
+import undermask.drive.Edges;
 import undermask.drive.Modulation;
+import undermask.drive.ModulationPlan;
 import undermask.drive.OperatingPoint;
+import undermask.drive.Switching;
 import undermask.drive.VoltageCurve;
 import undermask.signal.EdgeTrain;
 
@@ -22,20 +26,21 @@ final class Bridges {
             double carrierHz, Modulation modulation, CarrierSampling sampling, double deadTime, double index) {
         double lineVoltage = index * LINK / 2 * Math.sqrt(1.5);
         return new DriveSettings(
-                carrierHz,
-                modulation,
-                sampling,
-                deadTime,
-                STEEP,
-                STEEP,
-                EdgeForm.RAMP,
+                Carrier.fixed(carrierHz, sampling),
+                ModulationPlan.of(modulation),
+                Switching.of(deadTime),
+                Edges.of(STEEP, STEEP, EdgeForm.RAMP),
                 new VoltageCurve(lineVoltage, OUTPUT, 0),
                 OptionalDouble.of(LINK));
     }
 
     static Bridge without(Modulation modulation, CarrierSampling sampling, double ratio, double index) {
-        return Bridge.switching(
-                settings(ratio * OUTPUT, modulation, sampling, 0, index), new OperatingPoint(OUTPUT, 5, 0.8), LINK);
+        return switched(settings(ratio * OUTPUT, modulation, sampling, 0, index), new OperatingPoint(OUTPUT, 5, 0.8));
+    }
+
+    /** A bridge on a constant link whose load takes sines and slows no edge. */
+    static Bridge switched(DriveSettings settings, OperatingPoint point) {
+        return Bridge.switching(settings, point, LinkVoltage.constant(LINK), OutputLoad.IDEAL);
     }
 
     /** Coefficients of all lines from 1 to the highest wanted; their edges taken as ideal: the ramp divided out. */
@@ -48,8 +53,9 @@ final class Bridges {
         for (int n = 1; n <= highest; n++) {
             double x = Math.PI * n / train.period() * LINK / STEEP;
             double ramp = x == 0 ? 1 : Math.sin(x) / x;
-            re[n] = shiftedRe[n - 1] / ramp;
-            im[n] = shiftedIm[n - 1] / ramp;
+            // an edge begins at its instant, so that its middle is half a transition late
+            re[n] = (shiftedRe[n - 1] * Math.cos(x) - shiftedIm[n - 1] * Math.sin(x)) / ramp;
+            im[n] = (shiftedRe[n - 1] * Math.sin(x) + shiftedIm[n - 1] * Math.cos(x)) / ramp;
         }
         return new double[][] {re, im};
     }

@@ -37,17 +37,11 @@ class DeadTimeReferenceTest {
     private static double[] lost(CarrierSampling sampling, int line, double powerFactor) {
         OperatingPoint point = new OperatingPoint(Bridges.OUTPUT, 8, powerFactor);
         double[][] with = Bridges.lines(
-                Bridge.switching(
-                                Bridges.settings(CARRIER, Modulation.SINE_TRIANGLE, sampling, DEAD_TIME, 0.8),
-                                point,
-                                Bridges.LINK)
+                Bridges.switched(Bridges.settings(CARRIER, Modulation.SINE_TRIANGLE, sampling, DEAD_TIME, 0.8), point)
                         .leg(0),
                 line);
         double[][] without = Bridges.lines(
-                Bridge.switching(
-                                Bridges.settings(CARRIER, Modulation.SINE_TRIANGLE, sampling, 0, 0.8),
-                                point,
-                                Bridges.LINK)
+                Bridges.switched(Bridges.settings(CARRIER, Modulation.SINE_TRIANGLE, sampling, 0, 0.8), point)
                         .leg(0),
                 line);
         return new double[] {without[0][line] - with[0][line], without[1][line] - with[1][line]};
