@@ -23,6 +23,9 @@ public final class Bridge {
     private static final double RIPPLE_POINTS = 24;
 
     private static final int LEGS = 3;
+    /** Share of unfinished edges from which on they are worth a remark. */
+    private static final double WORTH_A_WORD = 0.1;
+
     /** Lines beyond so many times the carrier add nothing to a distortion weighted by 1/h. */
     private static final double HARMONICS_OF_CARRIER = 50;
 
@@ -109,7 +112,7 @@ public final class Bridge {
                         case HOLD -> "held";
                     });
         }
-        if (unfinished > 0) {
+        if (unfinished > WORTH_A_WORD * edges) {
             remarks.add(Figures.fixed(100.0 * unfinished / edges, 0)
                     + " % of the edges are not finished by the current and forced when the dead time ends");
         }

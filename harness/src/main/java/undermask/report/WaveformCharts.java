@@ -78,11 +78,15 @@ final class WaveformCharts {
         chart.getStyler().setXAxisMax(1e3 * span);
     }
 
-    /** The first rising edge with the shortest transition. */
+    /** Of the highest rising edges, which are not cut short, the one with the shortest transition. */
     private static OptionalInt steepest(EdgeTrain train) {
+        double highest = 0;
+        for (int e = 0; e < train.size(); e++) {
+            highest = Math.max(highest, train.step(e));
+        }
         int best = -1;
         for (int e = 0; e < train.size(); e++) {
-            if (train.step(e) > 0
+            if (train.step(e) > 0.8 * highest
                     && (best < 0
                             || train.shape(e).transitionTime()
                                     < train.shape(best).transitionTime())) {
@@ -125,11 +129,9 @@ final class WaveformCharts {
                 highest(chart, "leg", bridge.leg(0).lines(), GREY),
                 highest(chart, "common mode", bridge.commonMode().lines(), ORANGE));
         double carrier = bridge.window().carrierHz();
-        double fastest = Double.POSITIVE_INFINITY;
-        for (int e = 0; e < bridge.leg(0).size(); e++) {
-            fastest = Math.min(fastest, bridge.leg(0).shape(e).transitionTime());
-        }
-        if (Double.isFinite(fastest)) {
+        OptionalInt steepest = steepest(bridge.leg(0));
+        if (steepest.isPresent()) {
+            double fastest = bridge.leg(0).shape(steepest.getAsInt()).transitionTime();
             TrapezoidEnvelope envelope = new TrapezoidEnvelope(bridge.link().mean(), carrier, 0.5 / carrier, fastest);
             double[] x = {LOWEST, envelope.pulseCorner(), envelope.edgeCorner(), HIGHEST};
             java.util.Arrays.sort(x);
@@ -157,7 +159,8 @@ final class WaveformCharts {
         for (int n = Math.max(1, first); n <= count; n++) {
             double frequency = n * lines.spacing();
             double level = level(Math.sqrt(2) * Math.hypot(re[n - 1], im[n - 1]));
-            int bucket = (int) (Math.log(frequency / LOWEST) / Math.log(HIGHEST / LOWEST) * BUCKETS);
+            int bucket =
+                    Math.min(BUCKETS - 1, (int) (Math.log(frequency / LOWEST) / Math.log(HIGHEST / LOWEST) * BUCKETS));
             buckets.merge(bucket, new double[] {frequency, level}, (a, b) -> a[1] >= b[1] ? a : b);
             top = Math.max(top, level);
         }

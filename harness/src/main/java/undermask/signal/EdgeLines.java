@@ -13,7 +13,7 @@ final class EdgeLines implements Lines {
     /** What a change of slope adds beyond is below 1e-4 of the edges: a ripple of tenths at hundreds of hertz. */
     private static final double SLOPES_COUNT_UP_TO = 100e3;
 
-    private static final int PROBES = 24;
+    private static final int PROBES = 64;
 
     private final EdgeTrain train;
     private final NonUniformTransform transform = NonUniformTransform.BLOCK;
@@ -96,11 +96,11 @@ final class EdgeLines implements Lines {
     }
 
     /**
-     * Largest error of an edge's factor, whose modulus is at most about 1. Line n has a weight of 1/n in the spectrum,
-     * so early lines are held tighter; 1e-5, less than 0.0001 dB, is the loosest.
+     * Largest error of an edge's factor as a share of what the factors are in the block. Line n has a weight of 1/n in
+     * the spectrum, so early lines are held tighter; 1e-5, less than 0.0001 dB, is the loosest.
      */
     private static double tolerance(int first) {
-        return Math.min(1e-5, 1e-10 * first);
+        return Math.min(1e-5, 1e-9 * first);
     }
 
     private interface Strength {

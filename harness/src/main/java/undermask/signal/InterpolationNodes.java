@@ -38,20 +38,31 @@ final class InterpolationNodes {
      *
      * @param from start of the block in Hz
      * @param width of the block in Hz
-     * @param tolerance largest error of a factor
+     * @param tolerance largest error of a factor, as a share of the root of their mean square in the block's middle
      * @param below sets of so many nodes and more are not wanted
      * @return null when no smaller set does
      */
     static InterpolationNodes fewest(EdgeShape[] shapes, double from, double width, double tolerance, int below) {
+        double allowed = tolerance * typical(shapes, from + width / 2);
         for (InterpolationNodes set : SETS) {
             if (set.count() >= below) {
                 return null;
             }
-            if (set.error(shapes, from, width, tolerance) <= tolerance) {
+            if (set.error(shapes, from, width, allowed) <= allowed) {
                 return set;
             }
         }
         return null;
+    }
+
+    private static double typical(EdgeShape[] shapes, double frequency) {
+        double[] out = new double[2];
+        double sum = 0;
+        for (EdgeShape shape : shapes) {
+            shape.factor(frequency, out);
+            sum += out[0] * out[0] + out[1] * out[1];
+        }
+        return Math.sqrt(sum / Math.max(1, shapes.length));
     }
 
     /** The largest error over some shapes half-way between nodes and at the block's ends, or one above the tolerance. */

@@ -26,6 +26,51 @@ class EdgeTrainLawTest {
         }
     }
 
+    // Source: shift theorem, c_n·exp(−j2πnτ/T).
+    @Test
+    void aShiftInTimeTurnsEachLine() {
+        double[][] re = new double[2][40];
+        double[][] im = new double[2][40];
+        pulse(0.2e-3, 0.3e-3, 10).lines().read(1, 40, re[0], im[0]);
+        pulse(0.25e-3, 0.35e-3, 10).lines().read(1, 40, re[1], im[1]);
+        for (int n = 1; n <= 40; n++) {
+            double angle = -2 * Math.PI * n * 0.05;
+            double x = re[0][n - 1] * Math.cos(angle) - im[0][n - 1] * Math.sin(angle);
+            double y = re[0][n - 1] * Math.sin(angle) + im[0][n - 1] * Math.cos(angle);
+            assertThat(re[1][n - 1]).isCloseTo(x, within(1e-11));
+            assertThat(im[1][n - 1]).isCloseTo(y, within(1e-11));
+        }
+    }
+
+    // Source: levels of a sum of straight pieces, worked out by hand.
+    @Test
+    void aSlowGainTiltsTheLevels() {
+        EdgeTrain tilted = pulse(0.2e-3, 0.4e-3, 10).times(time -> 1 + 500 * Math.abs(time - 0.5e-3), 1);
+        assertThat(tilted.step(0)).isCloseTo(11.5, within(1e-12));
+        assertThat(tilted.step(1)).isCloseTo(-10.5, within(1e-12));
+        assertThat(tilted.slope(0)).isCloseTo(-5000, within(1e-8));
+        assertThat(tilted.mean()).isCloseTo(11 * 0.2, within(1e-12));
+        EdgeTrain difference = EdgeTrain.sum(List.of(tilted, tilted.times(0.5)), 1, -2);
+        assertThat(difference.rms()).isCloseTo(0, within(1e-9));
+    }
+
+    @Test
+    void shapedLevelsMeetTheStepsFarFromEdges() {
+        EdgeTrain train = new EdgeTrain(
+                1e-3,
+                new double[] {0.1e-3, 0.6e-3},
+                new double[] {20, -20},
+                new int[2],
+                List.of(new RampEdge(10e-6)),
+                -5);
+        ShapedLevel level = new ShapedLevel(train);
+        assertThat(level.at(0.05e-3)).isCloseTo(-5, within(1e-12));
+        assertThat(level.at(0.1e-3)).isCloseTo(5, within(1e-9));
+        assertThat(level.at(0.1025e-3)).isCloseTo(10, within(1e-9));
+        assertThat(level.at(1.3e-3)).isCloseTo(15, within(1e-12));
+        assertThat(level.at(-0.1e-3)).isCloseTo(-5, within(1e-12));
+    }
+
     @Test
     void linesOfASumAreTheSumOfLines() {
         EdgeTrain a = pulse(0.1e-3, 0.4e-3, 3);
