@@ -33,6 +33,7 @@ import undermask.drive.VoltageCurve;
 import undermask.installation.CablePart;
 import undermask.installation.Capacitor;
 import undermask.installation.FilterPart;
+import undermask.installation.FilterStage;
 import undermask.installation.Installation;
 import undermask.installation.Link;
 import undermask.installation.MainsLead;
@@ -72,14 +73,17 @@ public class WholeCheck {
                 3,
                 16,
                 new Capacitor(1e-6, 0.02, 15e-9),
-                new Capacitor(1e-6, 0.02, 15e-9),
-                new Capacitor(33e-9, 0.05, 10e-9),
-                3e-3,
-                15e-6,
-                20e-12,
-                8e3,
+                List.of(new FilterStage(
+                        3e-3,
+                        15e-6,
+                        20e-12,
+                        8e3,
+                        Optional.empty(),
+                        new Capacitor(1e-6, 0.02, 15e-9),
+                        new Capacitor(33e-9, 0.05, 10e-9))),
+                Double.POSITIVE_INFINITY,
                 "typical");
-        CablePart lead = new CablePart("shielded", 250e-12, 150e-9, 0.05, 1e6, 0.02, "typical");
+        CablePart lead = new CablePart("shielded", 250e-12, 150e-9, 0.05, 1e6, 0.02, true, "typical");
         MotorPart motor = new MotorPart("4 kW", 4e3, 0.3e-9, 3e-9, 2e-3, 4e3, 5, 22e-3, "typical");
         Installation installation = new Installation(
                 "bench",

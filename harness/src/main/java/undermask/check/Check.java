@@ -2,20 +2,43 @@ package undermask.check;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import undermask.drive.OperatingPoint;
 import undermask.mask.Judgement;
 import undermask.mask.Mask;
 import undermask.network.InstallationNetwork;
 import undermask.pwm.Bridge;
+import undermask.receiver.Detector;
 import undermask.receiver.Receiver;
 import undermask.receiver.Trace;
-import undermask.signal.EdgeTrain;
-import undermask.signal.Lines;
-import undermask.signal.Transfer;
 
 /** The road from saved settings to a verdict. */
 public final class Check {
-    private Check() {}
+    private static final double LOW = 0.05;
+    private static final double MIDDLE = 0.5;
+    private static final double HIGH = 0.95;
+
+    private final Profile profile;
+    private final Receiver receiver;
+    private final InstallationNetwork network;
+    private final Optional<ToleranceRuns> tolerances;
+
+    private Check(Profile profile) {
+        this.profile = profile;
+        this.receiver = Receiver.of(profile.mask().receiver());
+        double peak = Math.sqrt(2)
+                * profile.points().stream()
+                        .mapToDouble(OperatingPoint::loadCurrentRms)
+                        .max()
+                        .orElseThrow();
+        this.network = InstallationNetwork.of(
+                profile.installation(),
+                profile.mask().network(),
+                peak / profile.installation().fitting().motors());
+        this.tolerances = profile.policy().toleranceRuns() > 0
+                ? Optional.of(new ToleranceRuns(profile.installation(), network, profile.policy()))
+                : Optional.empty();
+    }
 
     /**
      * Checks one profile at all its operating points.
@@ -24,32 +47,58 @@ public final class Check {
      *     receiver can read
      */
     public static ProfileResult of(Profile profile) {
-        InstallationNetwork network =
-                InstallationNetwork.of(profile.installation(), profile.mask().network());
+        return new Check(profile).all();
+    }
+
+    private ProfileResult all() {
         List<PointResult> points = new ArrayList<>();
         Trace envelope = null;
+        Optional<TraceBand> band = Optional.empty();
         for (OperatingPoint point : profile.points()) {
-            PointResult result = at(point, profile, network);
+            PointResult result = at(point);
             points.add(result);
             envelope = envelope == null ? result.trace() : envelope.envelopeWith(result.trace());
+            band = band.isEmpty()
+                    ? result.band()
+                    : Optional.of(band.get().envelopeWith(result.band().orElseThrow()));
         }
-        return new ProfileResult(profile, points, envelope, judge(envelope, profile));
+        List<Judgement> judgements = judge(band.map(TraceBand::judged).orElse(envelope));
+        return new ProfileResult(profile, points, envelope, band, judgements, leverages(points, judgements));
     }
 
-    private static PointResult at(OperatingPoint point, Profile profile, InstallationNetwork network) {
+    private PointResult at(OperatingPoint point) {
         Bridge bridge = Bridge.switching(profile.settings(), point, profile.link(point), profile.load());
-        EdgeTrain edges = bridge.commonMode();
-        Lines source = edges.lines();
+        PortLines lines = PortLines.stored(bridge, network);
         Trace worst = null;
-        for (Transfer toPort : network.commonModeTransfers()) {
-            Lines atPort = source.through(toPort);
-            Trace trace = Receiver.of(profile.mask().receiver()).scan(atPort);
+        for (int port = 0; port < lines.ports(); port++) {
+            Trace trace = receiver.scan(lines.both(port));
             worst = worst == null ? trace : worst.envelopeWith(trace);
         }
-        return new PointResult(point, bridge, worst, judge(worst, profile));
+        Trace nominal = worst;
+        Optional<TraceBand> band = tolerances.map(runs -> band(runs, lines, nominal));
+        return new PointResult(
+                point, bridge, nominal, band, judge(band.map(TraceBand::judged).orElse(nominal)));
     }
 
-    private static List<Judgement> judge(Trace trace, Profile profile) {
+    private TraceBand band(ToleranceRuns runs, PortLines lines, Trace nominal) {
+        double[] frequencies = runs.frequencies();
+        PortMix[][] mixes = new PortMix[lines.ports()][frequencies.length];
+        for (int i = 0; i < frequencies.length; i++) {
+            PortMix[] here = lines.mixes(frequencies[i], receiver.bandwidth(frequencies[i]));
+            for (int port = 0; port < here.length; port++) {
+                mixes[port][i] = here[port];
+            }
+        }
+        double[][] shifts =
+                runs.shifts(mixes, LOW, MIDDLE, HIGH, profile.policy().percentile());
+        return new TraceBand(
+                nominal.shifted(f -> runs.at(shifts[0], f)),
+                nominal.shifted(f -> runs.at(shifts[1], f)),
+                nominal.shifted(f -> runs.at(shifts[2], f)),
+                nominal.shifted(f -> runs.at(shifts[3], f)));
+    }
+
+    private List<Judgement> judge(Trace trace) {
         Mask mask = profile.mask();
         double required = profile.policy().requiredMarginDb();
         return mask.detectors().stream()
@@ -57,5 +106,27 @@ public final class Check {
                         .orElseThrow(() -> new IllegalArgumentException(
                                 "mask " + mask.name() + " limits no frequency that its receiver reads")))
                 .toList();
+    }
+
+    /** What rules at the worst frequency of each detector, at the point where that is. */
+    private List<Leverage> leverages(List<PointResult> points, List<Judgement> judgements) {
+        return judgements.stream()
+                .map(judgement -> {
+                    Bridge bridge = worst(points, judgement.detector()).bridge();
+                    double frequency = judgement.frequencyHz();
+                    return Leverage.of(
+                            network,
+                            PortLines.few(bridge, network).mixes(frequency, receiver.bandwidth(frequency)),
+                            frequency);
+                })
+                .toList();
+    }
+
+    private static PointResult worst(List<PointResult> points, Detector detector) {
+        PointResult worst = points.get(0);
+        for (PointResult point : points) {
+            worst = point.of(detector).marginDb() < worst.of(detector).marginDb() ? point : worst;
+        }
+        return worst;
     }
 }

@@ -56,6 +56,7 @@ public final class Main implements Runnable {
         line.addSubcommand("check", new CheckCommand(console));
         line.addSubcommand("waveform", new WaveformCommand(console));
         line.addSubcommand("masks", new MasksCommand(console));
+        line.addSubcommand("parts", new PartsCommand(console));
         line.setOut(new PrintWriter(out, true));
         line.setErr(new PrintWriter(err, true));
         line.setColorScheme(

@@ -7,6 +7,7 @@ import java.util.stream.Stream;
 import org.junit.jupiter.api.DisplayName;
 import org.junit.jupiter.api.DynamicTest;
 import org.junit.jupiter.api.TestFactory;
+import undermask.check.FurtherLimit;
 import undermask.input.ProfileFolder;
 import undermask.input.Refused;
 import undermask.report.CheckRun;
@@ -45,6 +46,18 @@ public final class ProfilesGate {
     }
 
     private static Stream<DynamicTest> tests(Outcome outcome) {
+        return Stream.concat(emission(outcome), outcome.furtherLimits().stream().map(limit -> further(outcome, limit)));
+    }
+
+    private static DynamicTest further(Outcome outcome, FurtherLimit limit) {
+        return DynamicTest.dynamicTest(outcome.profile().name() + ": " + limit.text(), () -> {
+            if (!limit.kept()) {
+                throw failure(limit.place() + ": " + limit.text());
+            }
+        });
+    }
+
+    private static Stream<DynamicTest> emission(Outcome outcome) {
         return outcome.judgements().stream().map(judgement -> {
             Finding finding = new Finding(outcome, judgement);
             return DynamicTest.dynamicTest(finding.title(), () -> {

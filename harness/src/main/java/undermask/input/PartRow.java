@@ -1,5 +1,7 @@
 package undermask.input;
 
+import java.util.ArrayList;
+import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import undermask.unit.Dimension;
@@ -40,6 +42,44 @@ final class PartRow {
         OptionalDouble value = numbers.withUnit(row.cell(column), new Range(column, dimension, low, high));
         right &= value.isPresent();
         return value.orElse(Double.NaN);
+    }
+
+    /** One number or several with semicolons between them; empty when one is not right, which is reported. */
+    List<Double> numbers(String column, Dimension dimension, double low, double high) {
+        Cell all = row.cell(column);
+        List<Double> values = new ArrayList<>();
+        for (String part : all.text().split(";", -1)) {
+            OptionalDouble value =
+                    numbers.withUnit(new Cell(part.strip(), all.place()), new Range(column, dimension, low, high));
+            right &= value.isPresent();
+            values.add(value.orElse(Double.NaN));
+        }
+        return values;
+    }
+
+    /** Whether a column is there and filled. */
+    boolean gives(String column) {
+        return !row.cell(column).empty();
+    }
+
+    /** Yes or no, or a stand-by when the column is not filled. */
+    boolean yes(String column, boolean otherwise) {
+        if (!gives(column)) {
+            return otherwise;
+        }
+        Cell cell = row.cell(column);
+        if (!cell.text().equals("yes") && !cell.text().equals("no")) {
+            right = false;
+            problems.add(cell, column + " must be yes or no");
+        }
+        return cell.text().equals("yes");
+    }
+
+    /** A part of another table; empty when it is unknown, which is reported. */
+    <T> Optional<T> part(String column, PartTable<T> table) {
+        Optional<T> part = table.named(row.cell(column));
+        right &= part.isPresent();
+        return part;
     }
 
     /** One of two counts; 0 when it is neither, which is reported. */

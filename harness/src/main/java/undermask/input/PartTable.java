@@ -35,9 +35,8 @@ final class PartTable<T> {
     }
 
     /** Takes the parts of a file; a name that is there already is overridden. */
-    void add(SourceText source, List<String> columns, Maker<T> maker) {
-        Optional<CsvTable> table =
-                CsvTable.read(source, new CsvTable.Columns(columns, List.of(), columns.size()), problems);
+    void add(SourceText source, CsvTable.Columns columns, Maker<T> maker) {
+        Optional<CsvTable> table = CsvTable.read(source, columns, problems);
         Map<String, Cell> names = new LinkedHashMap<>();
         for (CsvTable.Row row : table.map(CsvTable::rows).orElse(List.of())) {
             Cell name = row.first();
@@ -52,6 +51,13 @@ final class PartTable<T> {
         }
     }
 
+    /** The parts that are right, by name. */
+    Map<String, T> all() {
+        Map<String, T> all = new TreeMap<>();
+        parts.forEach((name, part) -> part.ifPresent(right -> all.put(name, right)));
+        return all;
+    }
+
     /** The part that a cell names; empty when it is unknown or its own row is wrong, which the problems say. */
     Optional<T> named(Cell cell) {
         Optional<T> part = parts.get(cell.text());
@@ -60,7 +66,7 @@ final class PartTable<T> {
                     cell,
                     "no such " + kind
                             + NearestName.hint(
-                                    cell.text(), parts.keySet(), "known are " + String.join(", ", parts.keySet())));
+                                    cell.text(), parts.keySet(), "the command \"parts\" lists what is known"));
             return Optional.empty();
         }
         return part;

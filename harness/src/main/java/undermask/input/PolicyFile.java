@@ -30,7 +30,13 @@ final class PolicyFile {
                 Policy.REQUIRED_MARGIN.quantity(),
                 () -> new Policy(
                         rows.number(Policy.REQUIRED_MARGIN, base.requiredMarginDb()),
-                        rows.yes("tight passes", base.tightPasses())));
+                        rows.yes("tight passes", base.tightPasses()),
+                        rows.number(Policy.PERCENTILE, base.percentile()),
+                        (int) rows.number(Policy.RUNS, base.toleranceRuns()),
+                        (long) rows.number(Policy.SEED, base.seed()),
+                        rows.gives(Policy.LEAKAGE_LIMIT.quantity())
+                                ? rows.optional(Policy.LEAKAGE_LIMIT)
+                                : base.leakageLimit()));
         return otherwise.isPresent() ? policy : Optional.empty();
     }
 }

@@ -10,6 +10,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import undermask.check.Profile;
+import undermask.installation.Catalogue;
 import undermask.mask.Mask;
 import undermask.unit.Place;
 
@@ -112,6 +113,23 @@ public final class ProfileFolder {
         List<Mask> masks = new Shelf(List.of(root), problems).allMasks();
         problems.refuseAny();
         return masks;
+    }
+
+    /**
+     * Every part that an installation of this folder may name.
+     *
+     * @throws Refused when an own one is wrong
+     */
+    public Catalogue parts() throws Refused {
+        Problems problems = new Problems();
+        Parts parts = new Shelf(List.of(root), problems).parts();
+        problems.refuseAny();
+        return new Catalogue(
+                parts.filters().all(),
+                parts.cables().all(),
+                parts.cores().all(),
+                parts.materials().all(),
+                parts.motors().all());
     }
 
     private Map<String, Path> files(Problems problems) {

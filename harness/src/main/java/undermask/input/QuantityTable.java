@@ -24,6 +24,8 @@ import undermask.unit.Worded;
  * {@link #record} sees to it that no stand-in gets into anything that is used.
  */
 final class QuantityTable {
+    private static final int MOST_LISTED = 12;
+
     private static final CsvTable.Columns COLUMNS =
             new CsvTable.Columns(List.of("quantity", "value", "unit", "note"), List.of(), 3);
 
@@ -249,8 +251,12 @@ final class QuantityTable {
                         row.getValue().first(),
                         "not a quantity of " + about
                                 + nearest.map(name -> "; nearest: " + name)
-                                        .orElseGet(() -> "; known are "
-                                                + asked.stream().sorted().collect(Collectors.joining(", "))));
+                                        .orElseGet(() -> asked.size() > MOST_LISTED
+                                                ? "; the README lists them"
+                                                : "; known are "
+                                                        + asked.stream()
+                                                                .sorted()
+                                                                .collect(Collectors.joining(", "))));
             }
         }
     }

@@ -11,6 +11,7 @@ import java.util.TreeMap;
 import java.util.TreeSet;
 import undermask.check.Policy;
 import undermask.installation.Installation;
+import undermask.installation.OwnElement;
 import undermask.mask.Mask;
 import undermask.unit.Place;
 
@@ -18,6 +19,7 @@ import undermask.unit.Place;
 final class Shelf {
     static final String INSTALLATIONS = "installations";
     static final String MASKS = "masks";
+    static final String ELEMENTS = "elements";
 
     private final List<Path> folders;
     private final Problems problems;
@@ -77,7 +79,7 @@ final class Shelf {
             installations.put(
                     name.text(),
                     SourceText.read(file, problems)
-                            .flatMap(text -> InstallationFile.read(text, name.text(), parts(), problems)));
+                            .flatMap(text -> InstallationFile.read(text, name.text(), this, problems)));
         }
         return installations.get(name.text());
     }
@@ -140,7 +142,30 @@ final class Shelf {
         return policy;
     }
 
-    private Parts parts() {
+    /** The elements of a file that a cell names; empty when it is unknown or wrong, which the problems say. */
+    Optional<List<OwnElement>> elements(Cell name) {
+        if (!isFileName(name, ELEMENTS)) {
+            return Optional.empty();
+        }
+        Map<String, Path> files = list(ELEMENTS);
+        Path file = files.get(name.text());
+        if (file == null) {
+            problems.add(
+                    name,
+                    "no such table of elements"
+                            + NearestName.hint(
+                                    name.text(),
+                                    files.keySet(),
+                                    files.isEmpty()
+                                            ? "there is none in " + places(ELEMENTS)
+                                            : "known are " + String.join(", ", files.keySet())));
+            return Optional.empty();
+        }
+        return SourceText.read(file, problems).flatMap(text -> ElementFile.read(text, problems));
+    }
+
+    /** The catalogue. */
+    Parts parts() {
         if (parts == null) {
             parts = Parts.read(folders, problems);
         }

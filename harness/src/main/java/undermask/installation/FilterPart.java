@@ -1,21 +1,17 @@
 package undermask.installation;
 
+import java.util.List;
 import java.util.Objects;
 
 /**
- * A one-stage mains filter of the catalogue: X capacitors on both sides of a current-compensated choke, Y capacitors on
- * its drive side.
+ * A mains filter of the catalogue: an X capacitor at the mains, then any number of stages.
  *
  * @param name as installations name it
  * @param phases 1 or 3
  * @param ratedCurrent in A
  * @param xMains X capacitor on the mains side, between each pair of lines
- * @param xDrive X capacitor on the drive side, likewise
- * @param y Y capacitor from each line to the filter's case on the drive side
- * @param chokeInductance common-mode inductance in H (all windings together)
- * @param leakageInductance per winding in H
- * @param windingCapacitance across each winding in F
- * @param lossResistance across the common-mode inductance in ohm
+ * @param stages from mains to drive, at least one
+ * @param dischargeResistance between each pair of lines at the mains, ohm; infinite for none
  * @param source where the values come from
  */
 public record FilterPart(
@@ -23,33 +19,31 @@ public record FilterPart(
         int phases,
         double ratedCurrent,
         Capacitor xMains,
-        Capacitor xDrive,
-        Capacitor y,
-        double chokeInductance,
-        double leakageInductance,
-        double windingCapacitance,
-        double lossResistance,
+        List<FilterStage> stages,
+        double dischargeResistance,
         String source) {
-    /** Builds a part; inductances, resistance and current are positive. */
+    /** Builds a part of at least one stage. */
     public FilterPart {
         Objects.requireNonNull(name);
         Objects.requireNonNull(source);
+        Objects.requireNonNull(xMains);
+        stages = List.copyOf(stages);
         if (phases != 1 && phases != 3) {
             throw new IllegalArgumentException("a filter has 1 or 3 phases, not " + phases);
         }
-        positive(ratedCurrent, "rated current");
-        positive(chokeInductance, "choke inductance");
-        positive(leakageInductance, "leakage inductance");
-        positive(windingCapacitance, "winding capacitance");
-        positive(lossResistance, "loss resistance");
-        if (leakageInductance >= chokeInductance) {
-            throw new IllegalArgumentException("leakage inductance is not below the choke inductance");
+        if (!(ratedCurrent > 0) || Double.isInfinite(ratedCurrent)) {
+            throw new IllegalArgumentException("rated current of a filter is " + ratedCurrent);
+        }
+        if (stages.isEmpty()) {
+            throw new IllegalArgumentException("a filter needs a stage");
+        }
+        if (!(dischargeResistance > 0)) {
+            throw new IllegalArgumentException("discharge resistance of a filter is " + dischargeResistance);
         }
     }
 
-    private static void positive(double value, String quantity) {
-        if (!(value > 0) || Double.isInfinite(value)) {
-            throw new IllegalArgumentException(quantity + " of a filter is " + value);
-        }
+    /** Y capacitance from each line to the case, all stages together, F. */
+    public double yPerLine() {
+        return stages.stream().mapToDouble(stage -> stage.y().capacitance()).sum();
     }
 }

@@ -1,5 +1,7 @@
 package undermask.installation;
 
+import java.util.List;
+import java.util.Map;
 import java.util.Objects;
 import java.util.Optional;
 import java.util.OptionalDouble;
@@ -13,10 +15,14 @@ import undermask.unit.Range;
  * @param filter mains filter; empty when none is fitted
  * @param filterEarthLead length of the conductor from the filter's case to the drive's PE, m
  * @param heatsinkCapacitance from each bridge leg to the heatsink, F
- * @param motorLead type of motor lead; its shield is bonded all round at both ends
+ * @param motorLead type of motor lead
  * @param motorLeadLength in m
  * @param frameBond inductance of a bond from the motor frame to the earthed structure, H; empty when the frame is
  *     earthed through the motor lead alone
+ * @param fitting how the motor lead is fitted
+ * @param options what is fitted to or taken out of the drive
+ * @param ownElements what somebody adds to the circuit
+ * @param deviations relative standard deviations that differ from the usual ones
  */
 public record Installation(
         String name,
@@ -29,7 +35,11 @@ public record Installation(
         CablePart motorLead,
         double motorLeadLength,
         MotorPart motor,
-        OptionalDouble frameBond) {
+        OptionalDouble frameBond,
+        LeadFitting fitting,
+        DriveOptions options,
+        List<OwnElement> ownElements,
+        Map<Parasitic, Double> deviations) {
     public static final Range FILTER_EARTH_LEAD = new Range("filter earth lead length", Dimension.LENGTH, 0.005, 5);
     public static final Range HEATSINK = new Range("heatsink capacitance", Dimension.CAPACITANCE, 1e-12, 10e-9);
     public static final Range MOTOR_LEAD_LENGTH = new Range("motor lead length", Dimension.LENGTH, 0.1, 300);
@@ -45,6 +55,10 @@ public record Installation(
         Objects.requireNonNull(link);
         Objects.requireNonNull(motorLead);
         Objects.requireNonNull(motor);
+        Objects.requireNonNull(fitting);
+        Objects.requireNonNull(options);
+        ownElements = List.copyOf(ownElements);
+        deviations = Map.copyOf(deviations);
         FILTER_EARTH_LEAD.check(filterEarthLead);
         HEATSINK.check(heatsinkCapacitance);
         MOTOR_LEAD_LENGTH.check(motorLeadLength);
@@ -57,11 +71,64 @@ public record Installation(
         });
     }
 
-    /** What the current of a bridge leg has to charge outside the drive's switches: heatsink, lead and motor, F. */
+    /** An installation of good practice: shield bonded all round, nothing added, usual deviations. */
+    public Installation(
+            String name,
+            Supply supply,
+            MainsLead mainsLead,
+            Optional<FilterPart> filter,
+            double filterEarthLead,
+            Link link,
+            double heatsinkCapacitance,
+            CablePart motorLead,
+            double motorLeadLength,
+            MotorPart motor,
+            OptionalDouble frameBond) {
+        this(
+                name,
+                supply,
+                mainsLead,
+                filter,
+                filterEarthLead,
+                link,
+                heatsinkCapacitance,
+                motorLead,
+                motorLeadLength,
+                motor,
+                frameBond,
+                LeadFitting.PLAIN,
+                DriveOptions.PLAIN,
+                List.of(),
+                Map.of());
+    }
+
+    /** Relative standard deviation of a value, a share. */
+    public double deviation(Parasitic parasitic) {
+        return deviations.getOrDefault(parasitic, parasitic.deviation());
+    }
+
+    /**
+     * Current through the Y capacitors into PE at mains frequency, A: that of one line alone, as when the others are
+     * switched later or interrupted; capacitors of the drive included where they are connected.
+     */
+    public double leakageCurrent() {
+        double perLine = filter.map(FilterPart::yPerLine).orElse(0.0)
+                + (options.linkEarthed() ? 2 * link.toEarth().capacitance() / supply.conductors() : 0);
+        double volts = supply.phases() == 1 ? supply.voltage() : supply.voltage() / Math.sqrt(3);
+        return 2 * Math.PI * supply.frequencyHz() * perLine * volts;
+    }
+
+    /**
+     * What the current of a bridge leg has to charge outside the drive's switches: heatsink, lead and motor, F. Behind a
+     * choke lead and motor are charged by the choke's current later on.
+     */
     public double legCapacitance() {
+        if (options.output().isPresent()) {
+            return heatsinkCapacitance;
+        }
         return heatsinkCapacitance
-                + motorLead.capacitance() * motorLeadLength / MOTOR_PHASES
-                + motor.terminalCapacitance();
+                + fitting.motors()
+                        * (motorLead.capacitance() * motorLeadLength / MOTOR_PHASES + motor.terminalCapacitance());
     }
 
     /**
@@ -69,6 +136,8 @@ public record Installation(
      * drive on single-phase mains feeds them in delta.
      */
     public double phaseInductance() {
-        return supply.phases() == 1 ? motor.leakageInductance() / MOTOR_PHASES : motor.leakageInductance();
+        double each = supply.phases() == 1 ? motor.leakageInductance() / MOTOR_PHASES : motor.leakageInductance();
+        return each / fitting.motors()
+                + options.output().map(OutputFilter::inductance).orElse(0.0);
     }
 }

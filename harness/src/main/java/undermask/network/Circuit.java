@@ -5,6 +5,7 @@ import java.util.HashMap;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import undermask.installation.Material;
 
 /**
  * A linear circuit: named nodes, elements between them, ideal sources. It never changes; {@link #solver()} computes it,
@@ -179,6 +180,32 @@ public final class Circuit {
                     ends.stream().mapToInt(this::number).toArray(),
                     inductance));
             return this;
+        }
+
+        /**
+         * Adds equal windings on a core of a material.
+         *
+         * @param leakage per winding in H
+         * @param shared inductance of the flux that all share, at low frequency, in H
+         */
+        Builder commonCore(List<String> starts, List<String> ends, double leakage, double shared, Material material) {
+            elements.add(new CommonCore(
+                    starts.stream().mapToInt(this::number).toArray(),
+                    ends.stream().mapToInt(this::number).toArray(),
+                    positive(leakage, "leakage inductance"),
+                    positive(shared, "shared inductance"),
+                    material));
+            return this;
+        }
+
+        /** The nodes named so far, in their order. */
+        List<String> names() {
+            return List.copyOf(numbers.keySet());
+        }
+
+        /** Whether a node has been named. */
+        boolean knows(String node) {
+            return node.equals(reference) || numbers.containsKey(node);
         }
 
         /** Adds a line; current that enters a core at an end leaves the return conductor at the same end. */

@@ -1,6 +1,7 @@
 package undermask.network;
 
 import undermask.installation.MotorPart;
+import undermask.installation.Parasitic;
 
 /**
  * A motor as common mode sees it: the small capacitance at its terminals in series with the frame's resistance, and
@@ -27,10 +28,25 @@ public final class CommonModeMotor {
     }
 
     static void addTo(Circuit.Builder circuit, MotorPart motor, String terminals, String frame) {
-        String star = "motor star point";
-        circuit.seriesResonant(terminals, frame, motor.frameResistance(), 0, 3 * motor.terminalCapacitance());
-        circuit.inductor(terminals, star, motor.windingInductance());
-        circuit.resistor(terminals, star, motor.windingResistance());
-        circuit.capacitor(star, frame, motor.starCapacitance());
+        addTo(circuit, motor, terminals, frame, "motor star point", Variation.NONE);
+    }
+
+    static void addTo(
+            Circuit.Builder circuit,
+            MotorPart motor,
+            String terminals,
+            String frame,
+            String star,
+            Variation variation) {
+        double loss = variation.factor(Parasitic.MOTOR_LOSS);
+        circuit.seriesResonant(
+                terminals,
+                frame,
+                loss * motor.frameResistance(),
+                0,
+                3 * variation.factor(Parasitic.MOTOR_TERMINALS) * motor.terminalCapacitance());
+        circuit.inductor(terminals, star, variation.factor(Parasitic.MOTOR_WINDING) * motor.windingInductance());
+        circuit.resistor(terminals, star, loss * motor.windingResistance());
+        circuit.capacitor(star, frame, variation.factor(Parasitic.MOTOR_STAR) * motor.starCapacitance());
     }
 }

@@ -6,34 +6,37 @@ import undermask.signal.EdgeTrain;
 import undermask.signal.Lines;
 
 /**
- * The current that the bridge takes from the DC link, Σ s_k·i_k with s_k 1 while leg k is at the upper rail. Its lines
- * follow from those of the legs: a sine shifts them by the output frequency, up and down.
+ * The current that the bridge takes from the DC link, Σ s_k·i_k with s_k 1 while leg k is at the upper rail. As the three
+ * currents add up to nothing, that is Σ (s_k − 1/2)·i_k: the legs' edges, each as high as its current.
  */
 public final class LinkCurrent {
     private static final double[] GAUSS_PLACES = {0.06943184420297371, 0.33000947820757187};
     private static final double[] GAUSS_WEIGHTS = {0.17392742256872692, 0.32607257743127307};
 
-    private final AnalysisWindow window;
-    /** Legs in units of the link voltage, between −1/2 and 1/2. */
-    private final List<EdgeTrain> units;
+    /** Points per output period between which a current is taken as straight. */
+    private static final double SINE_POINTS = 200;
 
+    private final AnalysisWindow window;
     private final PhaseCurrents currents;
-    /** Instants at which any leg switches, and which legs are at the upper rail after each. */
+    /** Legs in units of the link voltage, between −1/2 and 1/2. */
     private final EdgeTrain[] legs;
+
+    private final EdgeTrain train;
 
     LinkCurrent(AnalysisWindow window, List<EdgeTrain> units, PhaseCurrents currents) {
         this.window = window;
-        this.units = units;
         this.currents = currents;
         this.legs = units.toArray(EdgeTrain[]::new);
+        double outputPeriod = window.seconds() / window.fundamentalPeriods();
+        List<EdgeTrain> shares = IntStream.range(0, legs.length)
+                .mapToObj(k -> legs[k].times(time -> currents.at(k, time), outputPeriod / SINE_POINTS))
+                .toList();
+        this.train = EdgeTrain.sum(shares, 1, 1, 1);
     }
 
-    /**
-     * Lines of the current in A, of the load's sine alone: the carrier ripple, a few percent of the current, is left out.
-     * One reader at a time.
-     */
+    /** Lines of the current in A. One reader at a time. */
     public Lines lines() {
-        return new Shifted();
+        return train.lines();
     }
 
     /** Mean in A. */
@@ -91,67 +94,5 @@ public final class LinkCurrent {
             from = to;
         }
         return new double[] {mean / window.seconds(), square / window.seconds()};
-    }
-
-    private final class Shifted implements Lines {
-        private final List<Lines> spectra = units.stream().map(EdgeTrain::lines).toList();
-        private double[] re = new double[0];
-        private double[] im = new double[0];
-
-        @Override
-        public double spacing() {
-            return 1 / window.seconds();
-        }
-
-        @Override
-        public void read(int first, int count, double[] outRe, double[] outIm) {
-            if (first < 1) {
-                throw new IllegalArgumentException("line " + first + " is not above zero");
-            }
-            int shift = window.fundamentalPeriods();
-            int size = count + 2 * shift;
-            if (re.length < size) {
-                re = new double[size];
-                im = new double[size];
-            }
-            java.util.Arrays.fill(outRe, 0, count, 0);
-            java.util.Arrays.fill(outIm, 0, count, 0);
-            for (int k = 0; k < legs.length; k++) {
-                around(k, first - shift, size);
-                // half the phasor of the sine: i = 2·Re(h·exp(jω1t))
-                double lag = Math.atan2(currents.sine(k, 0.25 * window.seconds() / shift), currents.sine(k, 0));
-                double half = Math.hypot(currents.sine(k, 0.25 * window.seconds() / shift), currents.sine(k, 0)) / 2;
-                double hRe = half * Math.cos(lag);
-                double hIm = -half * Math.sin(lag);
-                for (int i = 0; i < count; i++) {
-                    double belowRe = re[i];
-                    double belowIm = im[i];
-                    double aboveRe = re[i + 2 * shift];
-                    double aboveIm = im[i + 2 * shift];
-                    outRe[i] += hRe * (belowRe + aboveRe) + hIm * (aboveIm - belowIm);
-                    outIm[i] += hRe * (belowIm + aboveIm) + hIm * (belowRe - aboveRe);
-                }
-            }
-        }
-
-        /** Lines of a leg from a number that may lie below 1: line 0 is the mean, negative ones are conjugate. */
-        private void around(int leg, int first, int size) {
-            int from = Math.max(1, first);
-            int missing = from - first;
-            Lines lines = spectra.get(leg);
-            double[] aboveRe = new double[Math.max(size - missing, missing)];
-            double[] aboveIm = new double[aboveRe.length];
-            lines.read(from, aboveRe.length, aboveRe, aboveIm);
-            for (int i = 0; i < size; i++) {
-                int line = first + i;
-                if (line == 0) {
-                    re[i] = 0.5 + units.get(leg).mean();
-                    im[i] = 0;
-                } else {
-                    re[i] = aboveRe[Math.abs(line) - from];
-                    im[i] = line > 0 ? aboveIm[line - from] : -aboveIm[-line - from];
-                }
-            }
-        }
     }
 }

@@ -29,6 +29,16 @@ public final class Receiver {
         return new Receiver(standard.bands());
     }
 
+    /** The 6 dB bandwidth that a frequency is read with, Hz. */
+    public double bandwidth(double frequency) {
+        return bands.stream()
+                .filter(band -> frequency >= band.from() && frequency <= band.to())
+                .findFirst()
+                .orElse(bands.get(bands.size() - 1))
+                .response()
+                .bandwidth();
+    }
+
     /**
      * Reads all tuning steps of all bands. The steps are the same for every window.
      *

@@ -1,6 +1,7 @@
 package undermask.receiver;
 
 import java.util.Arrays;
+import java.util.function.DoubleUnaryOperator;
 
 /**
  * What a receiver shows over a scan: a level per tuning step and detector. Frequencies rise strictly. A detector that
@@ -49,6 +50,25 @@ public final class Trace {
     /** Level at a tuning step in dBµV; NaN where the receiver has no such detector. */
     public double levelDbuv(Detector detector, int step) {
         return levelsDbuv[detector.ordinal()][step];
+    }
+
+    /**
+     * This trace with all detectors shifted alike.
+     *
+     * @param decibels to add at a frequency in Hz
+     */
+    public Trace shifted(DoubleUnaryOperator decibels) {
+        double[][] shifted = new double[levelsDbuv.length][];
+        for (int d = 0; d < shifted.length; d++) {
+            shifted[d] = levelsDbuv[d].clone();
+        }
+        for (int i = 0; i < frequencies.length; i++) {
+            double shift = decibels.applyAsDouble(frequencies[i]);
+            for (double[] row : shifted) {
+                row[i] += shift;
+            }
+        }
+        return new Trace(frequencies, shifted);
     }
 
     /**

@@ -5,11 +5,13 @@ import java.awt.Color;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.TreeMap;
 import org.knowm.xchart.XYChart;
 import org.knowm.xchart.XYSeries;
 import org.knowm.xchart.style.XYStyler;
 import org.knowm.xchart.style.markers.SeriesMarkers;
+import undermask.check.TraceBand;
 import undermask.mask.Judgement;
 import undermask.mask.LimitSegment;
 import undermask.mask.Mask;
@@ -25,6 +27,8 @@ final class Charts {
             Detector.AVERAGE, new Color(0x0b, 0x5f, 0xa5));
 
     private static final BasicStroke TRACE = new BasicStroke(1.2f, BasicStroke.CAP_ROUND, BasicStroke.JOIN_ROUND);
+    private static final BasicStroke FAINT =
+            new BasicStroke(0.9f, BasicStroke.CAP_BUTT, BasicStroke.JOIN_ROUND, 10, new float[] {2, 3}, 0);
     private static final BasicStroke LIMIT =
             new BasicStroke(2.2f, BasicStroke.CAP_BUTT, BasicStroke.JOIN_ROUND, 10, new float[] {9, 5}, 0);
     private static final int BUCKETS = 600;
@@ -34,7 +38,8 @@ final class Charts {
     private Charts() {}
 
     /** The three detectors against their limits, worst frequencies marked. */
-    static Picture spectrum(String title, Trace trace, Mask mask, List<Judgement> judgements) {
+    static Picture spectrum(
+            String title, Trace trace, Optional<TraceBand> band, Mask mask, List<Judgement> judgements) {
         XYChart chart = Canvas.chart(title, "frequency in MHz", "level in dB\u00b5V", 620);
         double low =
                 mask.segments().stream().mapToDouble(LimitSegment::fromHz).min().orElseThrow();
@@ -47,7 +52,14 @@ final class Charts {
         double top = 0;
         for (Detector detector : Detector.values()) {
             if (!Double.isNaN(trace.levelDbuv(detector, 0))) {
-                top = Math.max(top, addTrace(chart, trace, detector, low));
+                top = Math.max(top, addTrace(chart, detector.words(), trace, detector, low, TRACE));
+            }
+        }
+        if (band.isPresent()) {
+            for (Detector detector : mask.detectors()) {
+                String name = detector.words();
+                addTrace(chart, "5 % " + name, band.get().low(), detector, low, FAINT);
+                top = Math.max(top, addTrace(chart, "95 % " + name, band.get().high(), detector, low, FAINT));
             }
         }
         for (Detector detector : mask.detectors()) {
@@ -70,14 +82,15 @@ final class Charts {
     }
 
     /** Adds a trace thinned to the highest step of each bucket, and returns its top. */
-    private static double addTrace(XYChart chart, Trace trace, Detector detector, double low) {
+    private static double addTrace(
+            XYChart chart, String name, Trace trace, Detector detector, double low, BasicStroke stroke) {
         double span = Math.log(trace.frequency(trace.size() - 1) / low);
         TreeMap<Integer, Integer> highest = new TreeMap<>();
         double top = 0;
         for (int step = 0; step < trace.size(); step++) {
             double frequency = trace.frequency(step);
             if (frequency >= low) {
-                int bucket = (int) (Math.log(frequency / low) / span * BUCKETS);
+                int bucket = Math.min(BUCKETS - 1, (int) (Math.log(frequency / low) / span * BUCKETS));
                 int here = step;
                 highest.merge(
                         bucket, here, (a, b) -> trace.levelDbuv(detector, a) >= trace.levelDbuv(detector, b) ? a : b);
@@ -85,14 +98,14 @@ final class Charts {
             }
         }
         XYSeries series = chart.addSeries(
-                detector.words(),
+                name,
                 highest.values().stream()
                         .mapToDouble(step -> trace.frequency(step) / MEGAHERTZ)
                         .toArray(),
                 highest.values().stream()
                         .mapToDouble(step -> Math.max(LOWEST_SHOWN, trace.levelDbuv(detector, step)))
                         .toArray());
-        dress(series, COLOURS.get(detector), TRACE);
+        dress(series, COLOURS.get(detector), stroke);
         return top;
     }
 

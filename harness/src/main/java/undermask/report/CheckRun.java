@@ -79,7 +79,7 @@ public final class CheckRun {
     private Outcome one(Profile profile) throws IOException {
         ProfileResult result = Check.of(profile);
         Outcome outcome = Outcome.of(result);
-        folder.write(profile.name(), "envelope.csv", EnvelopeCsv.of(result.envelope(), profile.mask()));
+        folder.write(profile.name(), "envelope.csv", EnvelopeCsv.of(result.envelope(), result.band(), profile.mask()));
         charts.draw(
                 folder,
                 profile.name(),
@@ -88,6 +88,7 @@ public final class CheckRun {
                         profile.name() + " against " + profile.mask().name() + ": "
                                 + outcome.verdict().words(),
                         result.envelope(),
+                        result.band(),
                         profile.mask(),
                         result.judgements()));
         PointResult first = result.points().get(0);

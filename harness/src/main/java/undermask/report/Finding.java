@@ -1,6 +1,8 @@
 package undermask.report;
 
 import java.util.List;
+import java.util.stream.Collectors;
+import undermask.check.Leverage;
 import undermask.check.Profile;
 import undermask.drive.Carrier;
 import undermask.drive.Edges;
@@ -47,12 +49,33 @@ public final class Finding {
                 "  mask " + profile().mask().name() + ", " + Figures.fixed(judgement.requiredDb(), 1)
                         + " dB margin required",
                 "  worst at " + outcome.pointOf(judgement).label(),
+                "  " + rules(),
+                "  dB per +20 %: " + leverage(),
                 "  next: " + next());
     }
 
     /** The finding as one text. */
     public String text() {
         return String.join("\n", lines());
+    }
+
+    private String rules() {
+        Leverage leverage = outcome.leverage(judgement);
+        double lead = leverage.commonModeLeadDb();
+        return (leverage.commonModeRules()
+                        ? "common mode rules, differential mode "
+                        : "differential mode rules, common mode ")
+                + Figures.fixed(Math.abs(lead), 1) + " dB below";
+    }
+
+    /** The strongest values with what a fifth more of each does. */
+    private String leverage() {
+        return outcome.leverage(judgement).elements().stream()
+                .limit(2)
+                .map(element -> element.parasitic().words()
+                        + (element.decibels() >= 0 ? " +" : " ")
+                        + Figures.fixed(element.decibels(), 1))
+                .collect(Collectors.joining(", "));
     }
 
     private Place place() {

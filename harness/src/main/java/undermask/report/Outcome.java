@@ -2,6 +2,8 @@ package undermask.report;
 
 import java.util.Comparator;
 import java.util.List;
+import undermask.check.FurtherLimit;
+import undermask.check.Leverage;
 import undermask.check.PointResult;
 import undermask.check.Profile;
 import undermask.check.ProfileResult;
@@ -14,8 +16,9 @@ import undermask.receiver.Detector;
  *
  * @param points label and judgements of each operating point
  * @param judgements worst frequency of each limited detector over all points
+ * @param leverages what rules at each of these frequencies, in their order
  */
-public record Outcome(Profile profile, List<Point> points, List<Judgement> judgements) {
+public record Outcome(Profile profile, List<Point> points, List<Judgement> judgements, List<Leverage> leverages) {
     /**
      * What is kept of an operating point.
      *
@@ -41,7 +44,18 @@ public record Outcome(Profile profile, List<Point> points, List<Judgement> judge
                                 point.bridge().remarks(),
                                 point.judgements()))
                         .toList(),
-                result.judgements());
+                result.judgements(),
+                result.leverages());
+    }
+
+    /** What rules at the frequency of a judgement. */
+    Leverage leverage(Judgement judgement) {
+        return leverages.get(judgements.indexOf(judgement));
+    }
+
+    /** Further limits of the policy and what the profile makes of them. */
+    public List<FurtherLimit> furtherLimits() {
+        return FurtherLimit.of(profile);
     }
 
     /** The judgement with the least left of what its policy asks for. */
@@ -63,7 +77,8 @@ public record Outcome(Profile profile, List<Point> points, List<Judgement> judge
 
     /** Whether the profile's policy lets all of it through. */
     public boolean passes() {
-        return judgements.stream().allMatch(this::passes);
+        return judgements.stream().allMatch(this::passes)
+                && furtherLimits().stream().allMatch(FurtherLimit::kept);
     }
 
     /** The operating point at which a detector reads worst. */

@@ -119,6 +119,15 @@ public final class Summary {
                     .filter(judgement -> !outcome.passes(judgement))
                     .map(judgement -> new Finding(outcome, judgement).text())
                     .forEach(finding -> text.append('\n').append(finding).append('\n'));
+            outcome.furtherLimits().stream()
+                    .filter(limit -> !limit.kept())
+                    .forEach(limit -> text.append('\n')
+                            .append(limit.place())
+                            .append(": ")
+                            .append(outcome.profile().name())
+                            .append(": ")
+                            .append(limit.text())
+                            .append('\n'));
         }
         notes().forEach(note -> Paragraph.append(text.append('\n'), note, "note: ", "  "));
         return text.append('\n').append(counts()).append('\n').toString();

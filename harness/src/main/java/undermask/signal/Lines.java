@@ -25,4 +25,17 @@ public interface Lines {
     default Lines through(Transfer transfer) {
         return new FilteredLines(this, transfer);
     }
+
+    /** These lines and others of the same window added; one reader at a time. */
+    default Lines plus(Lines other) {
+        return new SumLines(this, other);
+    }
+
+    /**
+     * These lines kept in memory up to 30.2 MHz, for several readings; as they are when that would take more than 48 MB.
+     */
+    default Lines stored() {
+        double count = 30.2e6 / spacing();
+        return count > 3e6 ? this : new StoredLines(this, (int) count);
+    }
 }

@@ -3,7 +3,7 @@ package undermask.check;
 import org.hipparchus.ode.OrdinaryDifferentialEquation;
 import undermask.installation.CablePart;
 import undermask.installation.Capacitor;
-import undermask.installation.FilterPart;
+import undermask.installation.FilterStage;
 import undermask.installation.Installation;
 import undermask.installation.MotorPart;
 
@@ -52,7 +52,7 @@ final class CommonModeInTime implements OrdinaryDifferentialEquation {
     private final Source source;
     private final double lines;
     private final Installation installation;
-    private final FilterPart filter;
+    private final FilterStage filter;
     private final MotorPart motor;
     private final Capacitor toEarth;
     private final Capacitor link;
@@ -65,7 +65,7 @@ final class CommonModeInTime implements OrdinaryDifferentialEquation {
         this.sections = sections;
         this.source = source;
         lines = installation.supply().conductors();
-        filter = installation.filter().orElseThrow();
+        filter = installation.filter().orElseThrow().stages().get(0);
         motor = installation.motor();
         toEarth = installation.link().toEarth();
         link = installation.link().capacitor();
@@ -125,8 +125,8 @@ final class CommonModeInTime implements OrdinaryDifferentialEquation {
         // the choke: leakage, then core inductance beside core loss; winding capacitance across all
         double core = filter.lossResistance() * (x[I_LEAKAGE] - x[I_CORE]);
         d[V_WINDING] = (x[I_LEAD] - x[I_LEAKAGE]) / (lines * filter.windingCapacitance());
-        d[I_LEAKAGE] = (x[V_WINDING] - core) * lines / filter.leakageInductance();
-        d[I_CORE] = core / (filter.chokeInductance() - filter.leakageInductance() / lines);
+        d[I_LEAKAGE] = (x[V_WINDING] - core) * lines / filter.leakage();
+        d[I_CORE] = core / (filter.choke() - filter.leakage() / lines);
         // PE of the drive above the ground plane: the mains lead's PE and the bonded motor lead in parallel
         double length = installation.mainsLead().length();
         double perLead = lines / (installation.mainsLead().lineInductance() * length);

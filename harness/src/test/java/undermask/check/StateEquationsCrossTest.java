@@ -22,7 +22,7 @@ class StateEquationsCrossTest {
 
     /** Next to no loss in the lead, whose course over frequency the state equations cannot follow. */
     private static final Installation INSTALLATION = WholeWayCrossTest.installation(
-            new CablePart("lead of no loss", 380e-12, 135e-9, 1e-5, 1e6, 1e-7, "generic"));
+            new CablePart("lead of no loss", 380e-12, 135e-9, 1e-5, 1e6, 1e-7, true, "generic"));
 
     // Source: none needed, the two ways share no code; 0.01 dB of interpolation and the lead's losses, see the whole
     // way
@@ -30,8 +30,9 @@ class StateEquationsCrossTest {
     @ValueSource(doubles = {9e3, 20e3, 70e3, 150e3, 320e3, 700e3, 1.3e6, 2.1e6, 3.15e6, 4.4e6, 5e6, 7e6, 10e6})
     void transferOfTheStateEquations(double frequency) {
         Transfer transfer = InstallationNetwork.of(INSTALLATION, MainsNetwork.CISPR_9_KHZ)
-                .commonModeTransfers()
-                .get(0);
+                .ports()
+                .get(0)
+                .commonMode();
         double[] re = {1};
         double[] im = {0};
         transfer.multiply(frequency, 1, 1, re, im);

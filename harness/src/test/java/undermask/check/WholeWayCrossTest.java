@@ -30,7 +30,6 @@ import undermask.drive.Switching;
 import undermask.drive.VoltageCurve;
 import undermask.installation.CablePart;
 import undermask.installation.Capacitor;
-import undermask.installation.FilterPart;
 import undermask.installation.Installation;
 import undermask.installation.Link;
 import undermask.installation.MainsLead;
@@ -38,6 +37,7 @@ import undermask.installation.MotorPart;
 import undermask.installation.Supply;
 import undermask.network.InstallationNetwork;
 import undermask.network.MainsNetwork;
+import undermask.network.OneStage;
 import undermask.pwm.Bridge;
 import undermask.pwm.LinkVoltage;
 import undermask.pwm.OutputLoad;
@@ -63,7 +63,7 @@ class WholeWayCrossTest {
     private static final double TOLERANCE_OF_LEAD = 1e-5;
 
     private static Installation installation() {
-        return installation(new CablePart("lead of low loss", 380e-12, 135e-9, 1e-3, 1e6, 1e-5, "generic"));
+        return installation(new CablePart("lead of low loss", 380e-12, 135e-9, 1e-3, 1e6, 1e-5, true, "generic"));
     }
 
     /** An evaporator fan of 0.75 kW on single-phase mains. */
@@ -72,7 +72,7 @@ class WholeWayCrossTest {
                 "evaporator fan",
                 new Supply(1, 230, 50),
                 new MainsLead(1.5, 0.6e-6, 0.7e-6),
-                Optional.of(new FilterPart(
+                Optional.of(OneStage.filter(
                         "one stage",
                         1,
                         10,
@@ -82,8 +82,7 @@ class WholeWayCrossTest {
                         6e-3,
                         60e-6,
                         12e-12,
-                        12e3,
-                        "generic")),
+                        12e3)),
                 0.1,
                 new Link(new Capacitor(470e-6, 150e-3, 40e-9), new Capacitor(4.7e-9, 100e-3, 0)),
                 80e-12,
@@ -112,8 +111,9 @@ class WholeWayCrossTest {
         EdgeTrain edges = commonMode();
         Lines lines = edges.lines()
                 .through(InstallationNetwork.of(installation(), MainsNetwork.CISPR_9_KHZ)
-                        .commonModeTransfers()
-                        .get(0));
+                        .ports()
+                        .get(0)
+                        .commonMode());
         int count = (int) (5.1e6 * edges.period());
         double[] re = new double[count + 1];
         double[] im = new double[count + 1];

@@ -126,7 +126,7 @@ class ProfileFolderTest {
                 .isEqualTo(new Link(new Capacitor(330e-6, 0.2, 30e-9), new Capacitor(4.7e-9, 0.05, 8e-9)));
         assertThat(dock.heatsinkCapacitance()).isEqualTo(0.1e-9);
         assertThat(dock.motorLead())
-                .isEqualTo(new CablePart("own-lead", 0.4e-9, 0.12e-6, 0.045, 1e6, 0.015, "measured"));
+                .isEqualTo(new CablePart("own-lead", 0.4e-9, 0.12e-6, 0.045, 1e6, 0.015, true, "measured"));
         assertThat(dock.motorLeadLength()).isEqualTo(7.5);
         assertThat(dock.motor().ratedPower()).isEqualTo(1500);
         assertThat(dock.frameBond()).hasValue(1.2e-6);

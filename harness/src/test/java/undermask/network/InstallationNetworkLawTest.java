@@ -22,7 +22,7 @@ class InstallationNetworkLawTest {
         Installation installation = Installations.random(random);
         MainsNetwork mains = MainsNetwork.values()[seed % 3];
         InstallationNetwork network = InstallationNetwork.of(installation, mains);
-        Transfer transfer = network.commonModeTransfers().get(0);
+        Transfer transfer = network.ports().get(0).commonMode();
         CircuitSolver solver = network.circuit().solver();
         String line = InstallationCircuit.lines(installation).get(0);
         for (int i = 0; i < 300; i++) {
@@ -37,20 +37,33 @@ class InstallationNetworkLawTest {
         }
     }
 
-    // Source: symmetry; in common mode all mains lines of any installation carry the same
+    // Source: symmetry; in common mode the lines that share a rail carry the same, and so do both of a single-phase
+    // supply
     @ParameterizedTest
     @MethodSource("seeds")
-    void linesReadAlike(int seed) {
+    void linesOfARailReadAlike(int seed) {
         SplittableRandom random = new SplittableRandom(100 + seed);
         Installation installation = Installations.random(random);
-        Circuit circuit = InstallationCircuit.of(installation, MainsNetwork.CISPR_9_KHZ);
+        Circuit circuit =
+                InstallationNetwork.of(installation, MainsNetwork.CISPR_9_KHZ).circuit();
         CircuitSolver solver = circuit.solver().tune(9e3 * Math.pow(30e6 / 9e3, random.nextDouble()));
         solver.excite(InstallationCircuit.COMMON_MODE_SOURCE);
-        Phasor first = null;
-        for (String line : InstallationCircuit.lines(installation)) {
-            Phasor level = solver.voltage(MainsNetwork.terminal(line));
-            first = first == null ? level : first;
-            assertThat(level.minus(first).modulus()).isLessThan(1e-9 * first.modulus());
-        }
+        java.util.List<String> lines = InstallationCircuit.lines(installation);
+        Phasor first = solver.voltage(MainsNetwork.terminal(lines.get(0)));
+        Phasor last = solver.voltage(MainsNetwork.terminal(lines.get(lines.size() - 1)));
+        assertThat(last.minus(first).modulus()).isLessThan(1e-9 * first.modulus());
+    }
+
+    // Source: Kirchhoff; what the link takes comes in on one line and leaves on the other
+    @ParameterizedTest
+    @MethodSource("seeds")
+    void linkCurrentReadsOppositeOnBothLinesOfASinglePhaseSupply(int seed) {
+        double frequency = 9e3 * Math.pow(30e6 / 9e3, new SplittableRandom(seed).nextDouble());
+        PortResponse response =
+                new PortResponse(Installations.singlePhase(5), MainsNetwork.CISPR_9_KHZ, 0, Variation.NONE);
+        double[] line = response.linkCurrent(0, frequency).clone();
+        double[] neutral = response.linkCurrent(1, frequency);
+        double modulus = Math.hypot(line[0], line[1]);
+        assertThat(Math.hypot(line[0] + neutral[0], line[1] + neutral[1])).isLessThan(1e-6 * modulus);
     }
 }

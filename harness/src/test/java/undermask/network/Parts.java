@@ -20,7 +20,7 @@ final class Parts {
 
     static FilterPart filter(String name) {
         CSVRecord row = row("/undermask/input/parts/filters.csv", name);
-        return new FilterPart(
+        return OneStage.filter(
                 name,
                 Integer.parseInt(row.get("phases")),
                 si(row.get("rated current")),
@@ -30,8 +30,7 @@ final class Parts {
                 si(row.get("choke")),
                 si(row.get("leakage")),
                 si(row.get("winding capacitance")),
-                si(row.get("loss resistance")),
-                row.get("source"));
+                si(row.get("loss resistance")));
     }
 
     static CablePart cable(String name) {
@@ -43,6 +42,7 @@ final class Parts {
                 si(row.get("resistance")),
                 si(row.get("resistance frequency")),
                 si(row.get("loss factor")),
+                true,
                 row.get("source"));
     }
 

@@ -1,0 +1,138 @@
+package undermask.check;
+
+import java.util.Arrays;
+import java.util.EnumMap;
+import java.util.Map;
+import java.util.SplittableRandom;
+import undermask.installation.Installation;
+import undermask.installation.Parasitic;
+import undermask.network.InstallationNetwork;
+import undermask.network.PortResponse;
+import undermask.network.Variation;
+
+/**
+ * Draws an installation's values anew, each log-normal about what is written, and keeps by which complex factor the
+ * transfers change, on a logarithmic grid of frequencies. The source lines and what the detectors make of them within a
+ * bandwidth do not change.
+ */
+final class ToleranceRuns {
+    private static final int POINTS = 500;
+    private static final double LOWEST_HZ = 9e3;
+    private static final double HIGHEST_HZ = 30e6;
+
+    private final double[] frequencies = new double[POINTS];
+    /** Factors of run, port and frequency: common mode and link current, real and imaginary part each. */
+    private final float[][][][] factors;
+
+    private final int ports;
+
+    ToleranceRuns(Installation installation, InstallationNetwork network, Policy policy) {
+        for (int i = 0; i < POINTS; i++) {
+            frequencies[i] = LOWEST_HZ * Math.pow(HIGHEST_HZ / LOWEST_HZ, i / (POINTS - 1.0));
+        }
+        ports = network.ports().size();
+        float[][][] nominal = solve(network.response(Variation.NONE));
+        factors = new float[policy.toleranceRuns()][][][];
+        SplittableRandom seeds = new SplittableRandom(policy.seed());
+        for (int run = 0; run < factors.length; run++) {
+            factors[run] = solve(network.response(drawn(installation, seeds.split())));
+            for (int port = 0; port < ports; port++) {
+                for (int i = 0; i < POINTS; i++) {
+                    divide(factors[run][port][i], nominal[port][i]);
+                }
+            }
+        }
+    }
+
+    private static Variation drawn(Installation installation, SplittableRandom random) {
+        Map<Parasitic, Double> drawn = new EnumMap<>(Parasitic.class);
+        for (Parasitic parasitic : Parasitic.values()) {
+            double deviation = installation.deviation(parasitic);
+            double sigma = Math.sqrt(Math.log1p(deviation * deviation));
+            drawn.put(parasitic, Math.exp(sigma * gaussian(random)));
+        }
+        return drawn::get;
+    }
+
+    /** A normal deviate (Box and Muller 1958). */
+    private static double gaussian(SplittableRandom random) {
+        return Math.sqrt(-2 * Math.log(1 - random.nextDouble())) * Math.cos(2 * Math.PI * random.nextDouble());
+    }
+
+    private float[][][] solve(PortResponse response) {
+        float[][][] solved = new float[ports][POINTS][4];
+        for (int i = 0; i < POINTS; i++) {
+            for (int port = 0; port < ports; port++) {
+                double[] common = response.commonMode(port, frequencies[i]);
+                double[] link = response.linkCurrent(port, frequencies[i]);
+                solved[port][i][0] = (float) common[0];
+                solved[port][i][1] = (float) common[1];
+                solved[port][i][2] = (float) link[0];
+                solved[port][i][3] = (float) link[1];
+            }
+        }
+        return solved;
+    }
+
+    private static void divide(float[] above, float[] below) {
+        for (int mode = 0; mode < 4; mode += 2) {
+            double[] ratio = PortMix.ratio(
+                    new double[] {above[mode], above[mode + 1]}, new double[] {below[mode], below[mode + 1]});
+            above[mode] = (float) ratio[0];
+            above[mode + 1] = (float) ratio[1];
+        }
+    }
+
+    double[] frequencies() {
+        return frequencies;
+    }
+
+    /**
+     * By how many decibels the reading of the worse port lies at a percentile, relative to what it is.
+     *
+     * @param mixes of each port at each frequency
+     * @param percentiles shares, each below the next
+     * @return a row per percentile, a value per frequency
+     */
+    double[][] shifts(PortMix[][] mixes, double... percentiles) {
+        double[][] shifts = new double[percentiles.length][POINTS];
+        double[] levels = new double[factors.length];
+        for (int i = 0; i < POINTS; i++) {
+            double nominal = 0;
+            for (int port = 0; port < ports; port++) {
+                nominal = Math.max(nominal, mixes[port][i].power());
+            }
+            for (int run = 0; run < levels.length; run++) {
+                double highest = 0;
+                for (int port = 0; port < ports; port++) {
+                    float[] factor = factors[run][port][i];
+                    highest = Math.max(highest, mixes[port][i].power(new double[] {factor[0], factor[1]}, new double[] {
+                        factor[2], factor[3]
+                    }));
+                }
+                levels[run] = nominal > 0 && highest > 0 ? 10 * Math.log10(highest / nominal) : 0;
+            }
+            Arrays.sort(levels);
+            for (int p = 0; p < percentiles.length; p++) {
+                shifts[p][i] = between(levels, percentiles[p]);
+            }
+        }
+        return shifts;
+    }
+
+    /** A percentile between the two values next to it. */
+    private static double between(double[] sorted, double share) {
+        double place = share * (sorted.length - 1);
+        int below = (int) Math.floor(place);
+        int above = Math.min(below + 1, sorted.length - 1);
+        return sorted[below] + (place - below) * (sorted[above] - sorted[below]);
+    }
+
+    /** A value of the grid at a frequency, straight over the logarithm of frequency. */
+    double at(double[] row, double frequency) {
+        double place = Math.log(frequency / LOWEST_HZ) / Math.log(HIGHEST_HZ / LOWEST_HZ) * (POINTS - 1);
+        int below = Math.max(0, Math.min(POINTS - 2, (int) Math.floor(place)));
+        double share = Math.max(0, Math.min(1, place - below));
+        return row[below] + share * (row[below + 1] - row[below]);
+    }
+}
