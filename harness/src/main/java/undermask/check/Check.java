@@ -1,8 +1,11 @@
 package undermask.check;
 
 import java.util.ArrayList;
+import java.util.EnumMap;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
+import java.util.stream.IntStream;
 import undermask.drive.OperatingPoint;
 import undermask.mask.Judgement;
 import undermask.mask.Mask;
@@ -26,15 +29,8 @@ public final class Check {
     private Check(Profile profile) {
         this.profile = profile;
         this.receiver = Receiver.of(profile.mask().receiver());
-        double peak = Math.sqrt(2)
-                * profile.points().stream()
-                        .mapToDouble(OperatingPoint::loadCurrentRms)
-                        .max()
-                        .orElseThrow();
-        this.network = InstallationNetwork.of(
-                profile.installation(),
-                profile.mask().network(),
-                peak / profile.installation().fitting().motors());
+        this.network =
+                InstallationNetwork.of(profile.installation(), profile.mask().network(), profile.peakCurrent());
         this.tolerances = profile.policy().toleranceRuns() > 0
                 ? Optional.of(new ToleranceRuns(profile.installation(), network, profile.policy()))
                 : Optional.empty();
@@ -81,21 +77,38 @@ public final class Check {
     }
 
     private TraceBand band(ToleranceRuns runs, PortLines lines, Trace nominal) {
-        double[] frequencies = runs.frequencies();
-        PortMix[][] mixes = new PortMix[lines.ports()][frequencies.length];
-        for (int i = 0; i < frequencies.length; i++) {
-            PortMix[] here = lines.mixes(frequencies[i], receiver.bandwidth(frequencies[i]));
-            for (int port = 0; port < here.length; port++) {
-                mixes[port][i] = here[port];
+        PortReadings[] readings = new PortReadings[lines.ports()];
+        for (int port = 0; port < readings.length; port++) {
+            readings[port] = PortReadings.of(lines, port, receiver, runs.frequencies());
+        }
+        Map<Detector, double[][]> shifts = new EnumMap<>(Detector.class);
+        for (Detector detector : Detector.values()) {
+            if (!Double.isNaN(nominal.levelDbuv(detector, 0))) {
+                shifts.put(
+                        detector,
+                        runs.shifts(
+                                readings,
+                                detector,
+                                LOW,
+                                MIDDLE,
+                                HIGH,
+                                profile.policy().percentile()));
             }
         }
-        double[][] shifts =
-                runs.shifts(mixes, LOW, MIDDLE, HIGH, profile.policy().percentile());
+        List<Trace> percentiles = IntStream.range(0, 4)
+                .mapToObj(p -> nominal.shifted((detector, frequency) ->
+                        shifts.containsKey(detector) ? runs.at(shifts.get(detector)[p], frequency) : 0))
+                .toList();
         return new TraceBand(
-                nominal.shifted(f -> runs.at(shifts[0], f)),
-                nominal.shifted(f -> runs.at(shifts[1], f)),
-                nominal.shifted(f -> runs.at(shifts[2], f)),
-                nominal.shifted(f -> runs.at(shifts[3], f)));
+                percentiles.get(0), percentiles.get(1), percentiles.get(2), judged(nominal, percentiles.get(3)));
+    }
+
+    /**
+     * From the middle upwards never less than the reading with all values as written: a percentile, taken frequency by
+     * frequency, smears resonances that the plant as written does have.
+     */
+    private Trace judged(Trace nominal, Trace percentile) {
+        return profile.policy().percentile() < MIDDLE ? percentile : percentile.envelopeWith(nominal);
     }
 
     private List<Judgement> judge(Trace trace) {

@@ -41,11 +41,24 @@ final class PortLines {
         return commonMode[port].plus(linkCurrent[port]);
     }
 
-    /** What a receiver gets of both at a frequency, port by port. */
+    Lines commonMode(int port) {
+        return commonMode[port];
+    }
+
+    Lines linkCurrent(int port) {
+        return linkCurrent[port];
+    }
+
+    /** What a receiver gets of both modes at a port and a frequency. */
+    PortMix mix(int port, double frequency, double bandwidth) {
+        return PortMix.of(commonMode[port], linkCurrent[port], frequency, bandwidth);
+    }
+
+    /** The same, port by port. */
     PortMix[] mixes(double frequency, double bandwidth) {
         PortMix[] mixes = new PortMix[ports()];
         for (int port = 0; port < mixes.length; port++) {
-            mixes[port] = PortMix.of(commonMode[port], linkCurrent[port], frequency, bandwidth);
+            mixes[port] = mix(port, frequency, bandwidth);
         }
         return mixes;
     }

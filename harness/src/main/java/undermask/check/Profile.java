@@ -11,6 +11,7 @@ import undermask.mask.Mask;
 import undermask.pwm.Bridge;
 import undermask.pwm.LinkVoltage;
 import undermask.pwm.OutputLoad;
+import undermask.unit.Figures;
 import undermask.unit.Place;
 
 /**
@@ -89,5 +90,29 @@ public record Profile(
     public OutputLoad load() {
         return new OutputLoad(
                 installation.phaseInductance(), settings.edges().outputCapacitance() + installation.legCapacitance());
+    }
+
+    /** Largest peak current of a motor conductor over all points, A; motors in parallel share the drive's. */
+    public double peakCurrent() {
+        double largest = points.stream()
+                .mapToDouble(OperatingPoint::loadCurrentRms)
+                .max()
+                .orElseThrow();
+        return Math.sqrt(2) * largest;
+    }
+
+    /** What a drive engineer should know of the installation at these currents, in sentences. */
+    public List<String> remarks() {
+        return installation
+                .fitting()
+                .cores()
+                .filter(cores -> cores.unsaturated(peakCurrent()) < 1)
+                .map(cores -> "ring core " + cores.core().name() + " saturates: the load current's field of "
+                        + Figures.significant(cores.field(peakCurrent()), 3) + " A/m exceeds "
+                        + Figures.significant(cores.core().saturationField(), 3) + " A/m, "
+                        + Figures.fixed(100 * cores.unsaturated(peakCurrent()), 0)
+                        + " % of its permeability are left")
+                .stream()
+                .toList();
     }
 }

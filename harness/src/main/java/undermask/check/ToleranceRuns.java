@@ -9,16 +9,17 @@ import undermask.installation.Parasitic;
 import undermask.network.InstallationNetwork;
 import undermask.network.PortResponse;
 import undermask.network.Variation;
+import undermask.receiver.Detector;
 
 /**
  * Draws an installation's values anew, each log-normal about what is written, and keeps by which complex factor the
- * transfers change, on a logarithmic grid of frequencies. The source lines and what the detectors make of them within a
- * bandwidth do not change.
+ * transfers change, on a logarithmic grid of frequencies. The source lines and what the detectors make of each mode do not
+ * change.
  */
 final class ToleranceRuns {
-    private static final int POINTS = 500;
+    private static final int POINTS = 320;
     private static final double LOWEST_HZ = 9e3;
-    private static final double HIGHEST_HZ = 30e6;
+    private static final double HIGHEST_HZ = 29.9e6;
 
     private final double[] frequencies = new double[POINTS];
     /** Factors of run, port and frequency: common mode and link current, real and imaginary part each. */
@@ -88,27 +89,23 @@ final class ToleranceRuns {
     }
 
     /**
-     * By how many decibels the reading of the worse port lies at a percentile, relative to what it is.
+     * By how many decibels a detector's reading of the worse port lies at a percentile, relative to what it is.
      *
-     * @param mixes of each port at each frequency
-     * @param percentiles shares, each below the next
+     * @param percentiles shares
      * @return a row per percentile, a value per frequency
      */
-    double[][] shifts(PortMix[][] mixes, double... percentiles) {
+    double[][] shifts(PortReadings[] readings, Detector detector, double... percentiles) {
         double[][] shifts = new double[percentiles.length][POINTS];
         double[] levels = new double[factors.length];
         for (int i = 0; i < POINTS; i++) {
             double nominal = 0;
-            for (int port = 0; port < ports; port++) {
-                nominal = Math.max(nominal, mixes[port][i].power());
+            for (PortReadings port : readings) {
+                nominal = Math.max(nominal, port.square(detector, i));
             }
             for (int run = 0; run < levels.length; run++) {
                 double highest = 0;
                 for (int port = 0; port < ports; port++) {
-                    float[] factor = factors[run][port][i];
-                    highest = Math.max(highest, mixes[port][i].power(new double[] {factor[0], factor[1]}, new double[] {
-                        factor[2], factor[3]
-                    }));
+                    highest = Math.max(highest, readings[port].square(detector, i, factors[run][port][i]));
                 }
                 levels[run] = nominal > 0 && highest > 0 ? 10 * Math.log10(highest / nominal) : 0;
             }

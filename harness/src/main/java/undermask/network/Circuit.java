@@ -198,9 +198,11 @@ public final class Circuit {
             return this;
         }
 
-        /** The nodes named so far, in their order. */
+        /** The nodes named so far, in their order, the reference first. */
         List<String> names() {
-            return List.copyOf(numbers.keySet());
+            List<String> names = new ArrayList<>(List.of(reference));
+            names.addAll(numbers.keySet());
+            return names;
         }
 
         /** Whether a node has been named. */

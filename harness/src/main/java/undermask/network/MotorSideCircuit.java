@@ -22,7 +22,7 @@ final class MotorSideCircuit {
     private static final double LEAD_OUTER_INDUCTANCE = 0.9e-6;
     /** Resistance of shield and PE core in parallel to that current, ohm/m (common practice). */
     private static final double LEAD_OUTER_RESISTANCE = 10e-3;
-    /** A shield that is not connected at an end still has capacitance to its surroundings, F/m (50 to 150 pF/m). */
+    /** A shield that is not held to earth at an end has capacitance to its surroundings, F/m (50 to 150 pF/m). */
     private static final double OPEN_SHIELD = 60e-12;
 
     private final Circuit.Builder circuit;
@@ -120,15 +120,16 @@ final class MotorSideCircuit {
                         variation.factor(Parasitic.SHIELD_TAIL)
                                 * EARTH_LEAD_INDUCTANCE
                                 * installation.fitting().pigtailLength());
-                yield open;
+                yield hanging(open);
             }
             case ONE_END -> atDrive ? earth : hanging(open);
             case NONE -> hanging(open);
         };
     }
 
+    /** Half of the shield's capacitance to its surroundings lies at each end. */
     private String hanging(String open) {
-        circuit.capacitor(open, GROUND, OPEN_SHIELD * installation.motorLeadLength());
+        circuit.capacitor(open, GROUND, OPEN_SHIELD * installation.motorLeadLength() / 2);
         return open;
     }
 }

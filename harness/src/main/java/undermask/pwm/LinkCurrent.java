@@ -39,6 +39,11 @@ public final class LinkCurrent {
         return train.lines();
     }
 
+    /** The current as steps as high as the legs' currents, with the slopes between them. */
+    public EdgeTrain train() {
+        return train;
+    }
+
     /** Mean in A. */
     public double mean() {
         return moments()[0];

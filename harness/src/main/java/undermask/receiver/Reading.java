@@ -5,4 +5,13 @@ package undermask.receiver;
  *
  * @param quasiPeak NaN where the receiver has no quasi-peak detector
  */
-public record Reading(double peak, double quasiPeak, double average) {}
+public record Reading(double peak, double quasiPeak, double average) {
+    /** What a detector reads, V rms. */
+    public double of(Detector detector) {
+        return switch (detector) {
+            case PEAK -> peak;
+            case QUASI_PEAK -> quasiPeak;
+            case AVERAGE -> average;
+        };
+    }
+}

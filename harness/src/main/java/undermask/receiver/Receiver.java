@@ -1,5 +1,7 @@
 package undermask.receiver;
 
+import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.List;
 import undermask.signal.Lines;
 import undermask.unit.Decibels;
@@ -31,12 +33,7 @@ public final class Receiver {
 
     /** The 6 dB bandwidth that a frequency is read with, Hz. */
     public double bandwidth(double frequency) {
-        return bands.stream()
-                .filter(band -> frequency >= band.from() && frequency <= band.to())
-                .findFirst()
-                .orElse(bands.get(bands.size() - 1))
-                .response()
-                .bandwidth();
+        return bandOf(frequency).response().bandwidth();
     }
 
     /**
@@ -70,10 +67,34 @@ public final class Receiver {
      * @throws IllegalArgumentException when no band of this receiver holds the frequency
      */
     public Reading at(double frequency, Lines lines) {
+        return read(bandOf(frequency), lines, new double[] {frequency})[0];
+    }
+
+    /**
+     * Reads several frequencies.
+     *
+     * @param frequencies rising, in Hz, each inside a band
+     * @throws IllegalArgumentException when no band of this receiver holds one of them
+     */
+    public List<Reading> at(double[] frequencies, Lines lines) {
+        List<Reading> readings = new ArrayList<>();
+        int from = 0;
+        while (from < frequencies.length) {
+            Band band = bandOf(frequencies[from]);
+            int to = from;
+            while (to < frequencies.length && bandOf(frequencies[to]) == band) {
+                to++;
+            }
+            readings.addAll(List.of(read(band, lines, Arrays.copyOfRange(frequencies, from, to))));
+            from = to;
+        }
+        return readings;
+    }
+
+    private Band bandOf(double frequency) {
         for (int i = bands.size() - 1; i >= 0; i--) {
-            Band band = bands.get(i);
-            if (frequency >= band.from() && frequency <= band.to()) {
-                return read(band, lines, new double[] {frequency})[0];
+            if (frequency >= bands.get(i).from() && frequency <= bands.get(i).to()) {
+                return bands.get(i);
             }
         }
         throw new IllegalArgumentException("no band of the receiver holds " + frequency + " Hz");

@@ -1,7 +1,6 @@
 package undermask.receiver;
 
 import java.util.Arrays;
-import java.util.function.DoubleUnaryOperator;
 
 /**
  * What a receiver shows over a scan: a level per tuning step and detector. Frequencies rise strictly. A detector that
@@ -52,20 +51,21 @@ public final class Trace {
         return levelsDbuv[detector.ordinal()][step];
     }
 
-    /**
-     * This trace with all detectors shifted alike.
-     *
-     * @param decibels to add at a frequency in Hz
-     */
-    public Trace shifted(DoubleUnaryOperator decibels) {
+    /** Decibels to add to a detector at a frequency. */
+    @FunctionalInterface
+    public interface Shift {
+        /** The shift of a detector at a frequency in Hz, dB. */
+        double at(Detector detector, double frequency);
+    }
+
+    /** This trace with each reading shifted. */
+    public Trace shifted(Shift shift) {
         double[][] shifted = new double[levelsDbuv.length][];
-        for (int d = 0; d < shifted.length; d++) {
+        for (Detector detector : Detector.values()) {
+            int d = detector.ordinal();
             shifted[d] = levelsDbuv[d].clone();
-        }
-        for (int i = 0; i < frequencies.length; i++) {
-            double shift = decibels.applyAsDouble(frequencies[i]);
-            for (double[] row : shifted) {
-                row[i] += shift;
+            for (int i = 0; i < frequencies.length; i++) {
+                shifted[d][i] += shift.at(detector, frequencies[i]);
             }
         }
         return new Trace(frequencies, shifted);

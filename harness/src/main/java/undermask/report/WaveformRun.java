@@ -5,9 +5,11 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.function.Consumer;
 import undermask.check.Profile;
+import undermask.cost.MotorTerminals;
 import undermask.drive.OperatingPoint;
 import undermask.pwm.AnalysisWindow;
 import undermask.pwm.Bridge;
+import undermask.signal.EdgeTrain;
 import undermask.unit.Dimension;
 import undermask.unit.Figures;
 
@@ -56,12 +58,30 @@ public final class WaveformRun {
                 "common mode        " + volts(bridge.commonMode().rms()) + " rms",
                 "link current       " + amperes(bridge.linkCurrent().mean()) + " mean, "
                         + amperes(bridge.linkCurrent().capacitorRms()) + " rms in the capacitor"));
+        said.add("motor terminals    " + terminals(profile, bridge));
         for (String remark : bridge.remarks()) {
             StringBuilder note = new StringBuilder();
             Paragraph.append(note, remark, "note: ", "  ");
             note.toString().lines().forEach(said::add);
         }
         return said;
+    }
+
+    /** Peak by reflection; the fastest edge of the line-to-line voltage travels to the motor. */
+    private static String terminals(Profile profile, Bridge bridge) {
+        EdgeTrain leg = bridge.leg(0);
+        double fastest = Double.POSITIVE_INFINITY;
+        for (int e = 0; e < leg.size(); e++) {
+            boolean whole = Math.abs(leg.step(e)) > bridge.link().mean() / 2;
+            fastest = whole ? Math.min(fastest, leg.shape(e).transitionTime()) : fastest;
+        }
+        if (Double.isInfinite(fastest)) {
+            return "no edge";
+        }
+        MotorTerminals terminals =
+                MotorTerminals.of(profile.installation(), bridge.link().mean(), fastest);
+        return volts(terminals.peak()) + " peak, rise " + Figures.withUnit(terminals.riseTime(), Dimension.TIME, 3)
+                + ", reflection " + Figures.fixed(terminals.reflection(), 2);
     }
 
     private static String window(AnalysisWindow window) {

@@ -32,10 +32,11 @@ public interface Lines {
     }
 
     /**
-     * These lines kept in memory up to 30.2 MHz, for several readings; as they are when that would take more than 48 MB.
+     * These lines kept in memory up to 30.2 MHz, for several readings; as they are when that would take more than 88 MB,
+     * which is a window of a third of a second.
      */
     default Lines stored() {
         double count = 30.2e6 / spacing();
-        return count > 3e6 ? this : new StoredLines(this, (int) count);
+        return count > 11e6 ? this : new StoredLines(this, (int) count);
     }
 }

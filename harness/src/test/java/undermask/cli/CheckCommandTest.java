@@ -161,6 +161,72 @@ class CheckCommandTest {
     }
 
     @Test
+    void aLeakageLimitIsHeldAndNamedLikeAnyOther() throws IOException {
+        SmallPlant.write(folder.resolve("profiles"), "pump", "filter-3ph-16a", "leakage current limit,3.5,mA,");
+        Run run = Run.in(folder, "check", "--no-charts");
+        assertThat(run.status()).isOne();
+        // 231 V on 100 nF at 50 Hz
+        assertThat(run.out()).contains("pump.csv:2:14: pump: leakage current at mains frequency 7.26 mA, limit 3.5 mA");
+        SmallPlant.write(folder.resolve("profiles"), "pump", "filter-3ph-16a", "leakage current limit,10,mA,");
+        assertThat(Run.in(folder, "check", "--no-charts").status()).isZero();
+    }
+
+    @Test
+    void toleranceRunsAddPercentilesToTheEnvelope() throws IOException {
+        SmallPlant.write(folder.resolve("profiles"), "pump", "filter-3ph-16a", "tolerance runs,10,,\npercentile,80,%,");
+        Run run = Run.in(folder, "check", "--no-charts");
+        assertThat(run.out()).contains("percentile 80 of 10").contains("CISPR 16-4-2");
+        assertThat(Files.readAllLines(folder.resolve("reports/pump/envelope.csv"))
+                        .get(0))
+                .isEqualTo("frequency_hz,peak_dbuv,quasi_peak_dbuv,average_dbuv,limit_quasi_peak_dbuv,"
+                        + "limit_average_dbuv,peak_p05_dbuv,quasi_peak_p05_dbuv,average_p05_dbuv,peak_p50_dbuv,"
+                        + "quasi_peak_p50_dbuv,average_p50_dbuv,peak_p95_dbuv,quasi_peak_p95_dbuv,average_p95_dbuv");
+    }
+
+    @Test
+    void aSaturatedCoreIsNamed() throws IOException {
+        Path profiles = folder.resolve("profiles");
+        SmallPlant.write(profiles, "pump", "filter-3ph-16a", "");
+        Files.writeString(
+                profiles.resolve("installations/plant-filter-3ph-16a.csv"),
+                "ring core,ring-25-tape,,\nring core placement,on-each,,\n",
+                java.nio.file.StandardOpenOption.APPEND);
+        Run run = Run.in(folder, "check", "--no-charts");
+        assertThat(run.out()).contains("note: pump: ring core ring-25-tape saturates");
+    }
+
+    @Test
+    void ownElementsJoinTheCircuitOrAreRefused() throws IOException {
+        Path profiles = folder.resolve("profiles");
+        SmallPlant.write(profiles, "pump", "filter-3ph-16a", "");
+        Files.createDirectories(profiles.resolve("elements"));
+        Path installation = profiles.resolve("installations/plant-filter-3ph-16a.csv");
+        Run.in(folder, "check", "--no-charts");
+        String before = Files.readString(folder.resolve("reports/summary.csv"));
+        Files.writeString(installation, "own elements,snubber,,\n", java.nio.file.StandardOpenOption.APPEND);
+        Files.writeString(
+                profiles.resolve("elements/snubber.csv"),
+                "from,to,kind,value,unit\nlink plus,snubber middle,capacitor,100,nF\nsnubber middle,drive PE,resistor,1,ohm\n");
+        assertThat(Run.in(folder, "check", "--no-charts").status()).isZero();
+        assertThat(folder.resolve("reports/summary.csv")).content().isNotEqualTo(before);
+        Files.writeString(
+                profiles.resolve("elements/snubber.csv"),
+                "from,to,kind,value,unit\nlink plus,nowhere,capacitor,100,nF\n");
+        Run floating = Run.in(folder, "check", "--no-charts");
+        assertThat(floating.status()).isEqualTo(2);
+        assertThat(floating.err())
+                .contains("plant-filter-3ph-16a.csv:13:14: ")
+                .contains("nothing else is connected to \"nowhere\"")
+                .contains("motor terminals");
+        Files.writeString(
+                profiles.resolve("elements/snubber.csv"),
+                "from,to,kind,value,unit\nlink plus,drive PE,coil,100,nF\nlink plus,drive PE,capacitor,100,ohm\n");
+        assertThat(Run.in(folder, "check", "--no-charts").err())
+                .contains("snubber.csv:2:20: \"coil\", kind must be resistor, inductor or capacitor")
+                .contains("snubber.csv:3:34: \"ohm\"");
+    }
+
+    @Test
     void quietPrintsNothing() throws IOException {
         SmallPlant.write(folder.resolve("profiles"), "pump", "filter-3ph-16a", "");
         Run run = Run.in(folder, "check", "--no-charts", "--quiet");

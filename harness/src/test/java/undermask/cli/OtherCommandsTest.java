@@ -66,6 +66,21 @@ class OtherCommandsTest {
     }
 
     @Test
+    void partsAreListedWithTheirSourceInEightyColumns() {
+        Run run = Run.of("parts");
+        assertThat(run.status()).isZero();
+        assertThat(run.out())
+                .contains("filter-3ph-16a-2st")
+                .contains("ring-36-nizn")
+                .contains("nanocrystalline-25000")
+                .contains("unshielded-4x2.5")
+                .contains("motor-75kw")
+                .contains("(generic)");
+        assertThat(run.out().lines())
+                .allSatisfy(line -> assertThat(line.length()).isLessThanOrEqualTo(80));
+    }
+
+    @Test
     void helpNamesCommandsAndExitStatuses() {
         Run run = Run.of("--help");
         assertThat(run.status()).isZero();
