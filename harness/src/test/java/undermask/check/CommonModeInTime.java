@@ -115,7 +115,7 @@ final class CommonModeInTime implements OrdinaryDifferentialEquation {
         double throughDiodes = x[I_LEAD] + x[I_Y];
         double toPe = x[I_LINK] - throughDiodes;
         double rails = x[V_TO_EARTH] + toEarth.esr() / 2 * toPe;
-        double inputs = rails - 50e-3 / (2 * lines) * throughDiodes;
+        double inputs = rails - 50e-3 / lines * throughDiodes;
         d[V_TO_EARTH] = toPe / (2 * toEarth.capacitance());
         d[I_Y] = (inputs - x[V_Y] - filter.y().esr() / lines * x[I_Y])
                 / (filter.y().esl() / lines + 0.8e-6 * installation.filterEarthLead());
