@@ -58,8 +58,11 @@ final class Charts {
         if (band.isPresent()) {
             for (Detector detector : mask.detectors()) {
                 String name = detector.words();
-                addTrace(chart, "5 % " + name, band.get().low(), detector, low, FAINT);
-                top = Math.max(top, addTrace(chart, "95 % " + name, band.get().high(), detector, low, FAINT));
+                String lower = "lower " + name;
+                addTrace(chart, lower, band.get().low(), detector, low, FAINT);
+                chart.getSeriesMap().get(lower).setShowInLegend(false);
+                top = Math.max(
+                        top, addTrace(chart, "5 and 95 % " + name, band.get().high(), detector, low, FAINT));
             }
         }
         for (Detector detector : mask.detectors()) {
