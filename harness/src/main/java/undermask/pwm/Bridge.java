@@ -23,8 +23,8 @@ public final class Bridge {
     private static final double RIPPLE_POINTS = 24;
 
     private static final int LEGS = 3;
-    /** Share of unfinished edges from which on they are worth a remark. */
-    private static final double WORTH_A_WORD = 0.1;
+    /** Share of the link voltage from which on an edge got across in one go. */
+    private static final double WHOLE = 0.8;
 
     /** Lines beyond so many times the carrier add nothing to a distortion weighted by 1/h. */
     private static final double HARMONICS_OF_CARRIER = 50;
@@ -96,38 +96,12 @@ public final class Bridge {
                 .toList();
         this.commonMode = EdgeTrain.sum(legs, 1 / 3.0, 1 / 3.0, 1 / 3.0);
         this.linkCurrent = new LinkCurrent(window, units, currents);
-        this.remarks = new ArrayList<>();
-        if (overmodulated) {
-            remarks.add(overmodulation(reference, settings));
-        }
-        if (!spread.none()) {
-            remarks.add("the carrier is spread over " + carrier.count() + " periods in a window of "
-                    + Figures.withUnit(window.seconds(), Dimension.TIME, 3)
-                    + ": twice the 160 ms in which the quasi-peak detector forgets");
-        }
-        if (shortened > 0) {
-            remarks.add(shortened + " pulses and gaps of a window are shorter than the minimum pulse width and "
-                    + switch (switching.shortPulses()) {
-                        case DROP -> "dropped";
-                        case HOLD -> "held";
-                    });
-        }
-        if (unfinished > WORTH_A_WORD * edges) {
-            remarks.add(Figures.fixed(100.0 * unfinished / edges, 0)
-                    + " % of the edges are not finished by the current and forced when the dead time ends");
-        }
-    }
-
-    private String overmodulation(Reference reference, DriveSettings settings) {
-        if (reference.sixStep()) {
-            return "six-step: the legs switch once per half-wave";
-        }
-        return "modulation index " + Figures.fixed(index, 3) + " is beyond the linear range of " + scheme.words()
-                + ", " + Figures.fixed(Reference.linearLimit(scheme), 3) + ": the reference is clipped"
-                + switch (settings.modulation().overmodulation()) {
-                    case COMPENSATED -> " and raised to give the voltage asked for";
-                    case CLIPPED -> ", the output voltage falls short";
-                };
+        this.remarks = new Remarks()
+                .overmodulation(reference, index, settings.modulation().overmodulation())
+                .spread(spread, carrier.count(), window)
+                .shortPulses(shortened, switching.shortPulses())
+                .unfinishedEdges(unfinished, edges)
+                .all();
     }
 
     /**
@@ -239,6 +213,17 @@ public final class Bridge {
         return Math.sqrt(2) * Math.hypot(re[0], im[0]);
     }
 
+    /** The shortest transition of an edge of leg 0 that gets across in one go, s; infinite when there is none. */
+    public double fastestTransition() {
+        EdgeTrain leg = legs.get(0);
+        double fastest = Double.POSITIVE_INFINITY;
+        for (int e = 0; e < leg.size(); e++) {
+            boolean whole = Math.abs(leg.step(e)) > WHOLE * link.mean();
+            fastest = whole ? Math.min(fastest, leg.shape(e).transitionTime()) : fastest;
+        }
+        return fastest;
+    }
+
     /** Current out of leg 0, 1 or 2 at a time in s: the load's sine and the carrier ripple, A. */
     public double current(int k, double time) {
         return currents.at(k, time);
@@ -256,6 +241,6 @@ public final class Bridge {
 
     /** What a drive engineer should know of this point, in sentences. */
     public List<String> remarks() {
-        return List.copyOf(remarks);
+        return remarks;
     }
 }

@@ -129,9 +129,8 @@ final class WaveformCharts {
                 highest(chart, "leg", bridge.leg(0).lines(), GREY),
                 highest(chart, "common mode", bridge.commonMode().lines(), ORANGE));
         double carrier = bridge.window().carrierHz();
-        OptionalInt steepest = steepest(bridge.leg(0));
-        if (steepest.isPresent()) {
-            double fastest = bridge.leg(0).shape(steepest.getAsInt()).transitionTime();
+        double fastest = bridge.fastestTransition();
+        if (Double.isFinite(fastest)) {
             TrapezoidEnvelope envelope = new TrapezoidEnvelope(bridge.link().mean(), carrier, 0.5 / carrier, fastest);
             double[] x = {LOWEST, envelope.pulseCorner(), envelope.edgeCorner(), HIGHEST};
             java.util.Arrays.sort(x);

@@ -9,7 +9,6 @@ import undermask.cost.MotorTerminals;
 import undermask.drive.OperatingPoint;
 import undermask.pwm.AnalysisWindow;
 import undermask.pwm.Bridge;
-import undermask.signal.EdgeTrain;
 import undermask.unit.Dimension;
 import undermask.unit.Figures;
 
@@ -69,12 +68,7 @@ public final class WaveformRun {
 
     /** Peak by reflection; the fastest edge of the line-to-line voltage travels to the motor. */
     private static String terminals(Profile profile, Bridge bridge) {
-        EdgeTrain leg = bridge.leg(0);
-        double fastest = Double.POSITIVE_INFINITY;
-        for (int e = 0; e < leg.size(); e++) {
-            boolean whole = Math.abs(leg.step(e)) > bridge.link().mean() / 2;
-            fastest = whole ? Math.min(fastest, leg.shape(e).transitionTime()) : fastest;
-        }
+        double fastest = bridge.fastestTransition();
         if (Double.isInfinite(fastest)) {
             return "no edge";
         }
