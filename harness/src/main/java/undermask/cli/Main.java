@@ -39,21 +39,21 @@ public final class Main implements Runnable {
         PrintStream out = new PrintStream(System.out, true, StandardCharsets.UTF_8);
         PrintStream err = new PrintStream(System.err, true, StandardCharsets.UTF_8);
         boolean colour = System.console() != null && System.getenv("NO_COLOR") == null;
-        System.exit(run(args, out, err, colour));
+        System.exit(run(args, new Console(out, err, colour, System.console() != null)));
     }
 
     /**
      * Runs the program.
      *
-     * @param out receives results
-     * @param err receives messages
-     * @param colour whether results may be coloured
      * @return the exit status
      */
-    static int run(String[] args, PrintStream out, PrintStream err, boolean colour) {
-        Console console = new Console(out, err, colour);
+    static int run(String[] args, Console console) {
+        PrintStream out = console.out();
+        PrintStream err = console.err();
+        boolean colour = console.colour();
         CommandLine line = new CommandLine(new Main());
         line.addSubcommand("check", new CheckCommand(console));
+        line.addSubcommand("sweep", new SweepCommand(console));
         line.addSubcommand("waveform", new WaveformCommand(console));
         line.addSubcommand("masks", new MasksCommand(console));
         line.addSubcommand("parts", new PartsCommand(console));
@@ -100,8 +100,13 @@ public final class Main implements Runnable {
         }
     }
 
-    /** Where results and messages go. */
-    record Console(PrintStream out, PrintStream err, boolean colour) {}
+    /**
+     * Where results and messages go.
+     *
+     * @param colour whether results may be coloured
+     * @param terminal whether somebody watches
+     */
+    record Console(PrintStream out, PrintStream err, boolean colour, boolean terminal) {}
 
     /** The folder that every command knows. */
     static final class Folders {

@@ -71,6 +71,7 @@ final class InstallationFile {
         return QuantityTable.read(source, "an installation", problems).flatMap(rows -> {
             Optional<Installation> installation = installation(rows, name, shelf);
             rows.rejectUnknown();
+            shelf.knowInstallation(rows.asked());
             return installation;
         });
     }

@@ -44,6 +44,7 @@ final class ProfileFile {
                 .flatMap(shelf::mask);
         Optional<Policy> policy = PolicyFile.read(rows, shelf.policy());
         rows.rejectUnknown();
+        shelf.knowProfile(rows.asked());
         if (settings.isEmpty() || points.isEmpty() || installation.isEmpty() || mask.isEmpty() || policy.isEmpty()) {
             return Optional.empty();
         }

@@ -104,6 +104,19 @@ public final class ProfileFolder {
     }
 
     /**
+     * A profile to be read with other values.
+     *
+     * @param profile name of a profile in this folder, or path of a file that ends in {@code .csv}
+     * @throws Refused when it cannot be read as it is
+     */
+    public VariedProfile varied(String profile) throws Refused {
+        Problems problems = new Problems();
+        Optional<Path> file = find(profile, files(problems), problems);
+        problems.refuseAny();
+        return new VariedProfile(CsvFolder.name(file.orElseThrow()), file.get(), foldersFor(file.get()));
+    }
+
+    /**
      * Every mask that a profile of this folder may name, published ones and own ones, sorted by name.
      *
      * @throws Refused when an own one is wrong

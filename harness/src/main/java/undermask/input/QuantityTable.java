@@ -261,6 +261,11 @@ final class QuantityTable {
         }
     }
 
+    /** Every quantity that was asked for. */
+    Set<String> asked() {
+        return Set.copyOf(asked);
+    }
+
     /** Whether the file has a row for a quantity, right or wrong. */
     boolean gives(String quantity) {
         return has(quantity);

@@ -29,6 +29,9 @@ final class Shelf {
     private final Map<String, Optional<Installation>> installations = new HashMap<>();
 
     private final Map<String, Optional<Mask>> masks = new HashMap<>();
+    private final Map<String, SetRow> installationRows;
+    private final Set<String> profileQuantities = new TreeSet<>();
+    private final Set<String> installationQuantities = new TreeSet<>();
     private Parts parts;
     private Optional<Policy> policy;
 
@@ -38,6 +41,16 @@ final class Shelf {
      * @param folders in the order in which they are asked
      */
     Shelf(List<Path> folders, Problems problems) {
+        this(folders, problems, Map.of());
+    }
+
+    /**
+     * Looks things up with some rows of installations set.
+     *
+     * @param installationRows what every installation's rows are set to
+     */
+    Shelf(List<Path> folders, Problems problems, Map<String, SetRow> installationRows) {
+        this.installationRows = installationRows;
         this.folders = List.copyOf(folders);
         this.problems = problems;
         this.installationFiles = list(INSTALLATIONS);
@@ -79,6 +92,7 @@ final class Shelf {
             installations.put(
                     name.text(),
                     SourceText.read(file, problems)
+                            .map(text -> installationRows.isEmpty() ? text : text.withRows(installationRows))
                             .flatMap(text -> InstallationFile.read(text, name.text(), this, problems)));
         }
         return installations.get(name.text());
@@ -162,6 +176,24 @@ final class Shelf {
             return Optional.empty();
         }
         return SourceText.read(file, problems).flatMap(text -> ElementFile.read(text, problems));
+    }
+
+    void knowProfile(Set<String> quantities) {
+        profileQuantities.addAll(quantities);
+    }
+
+    void knowInstallation(Set<String> quantities) {
+        installationQuantities.addAll(quantities);
+    }
+
+    /** What the profiles read so far may say. */
+    Set<String> profileQuantities() {
+        return profileQuantities;
+    }
+
+    /** What their installations may say. */
+    Set<String> installationQuantities() {
+        return installationQuantities;
     }
 
     /** The catalogue. */

@@ -12,8 +12,11 @@ import java.nio.file.AccessDeniedException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.Arrays;
+import java.util.LinkedHashSet;
 import java.util.Locale;
+import java.util.Map;
 import java.util.Optional;
+import java.util.Set;
 import undermask.unit.Figures;
 import undermask.unit.Place;
 
@@ -40,6 +43,34 @@ final class SourceText {
             }
         }
         this.lineStarts = Arrays.copyOf(starts, lines);
+    }
+
+    /**
+     * This text of a quantity file with some rows set: replaced where they stand, else added at the end.
+     *
+     * @param rows quantity to what stands behind it, {@code value,unit} with commas or semicolons as the file has them
+     */
+    SourceText withRows(Map<String, SetRow> rows) {
+        char separator = text.lines()
+                .filter(line -> line.startsWith("quantity"))
+                .findFirst()
+                .map(line -> line.contains(";") ? ';' : ',')
+                .orElse(',');
+        StringBuilder changed = new StringBuilder();
+        Set<String> left = new LinkedHashSet<>(rows.keySet());
+        for (String line : text.split("\n", -1)) {
+            int end = line.indexOf(separator);
+            String quantity = end < 0 ? "" : line.substring(0, end).strip();
+            changed.append(left.remove(quantity) ? row(quantity, rows.get(quantity), separator) : line)
+                    .append('\n');
+        }
+        left.forEach(quantity ->
+                changed.append(row(quantity, rows.get(quantity), separator)).append('\n'));
+        return new SourceText(file, changed.toString());
+    }
+
+    private static String row(String quantity, SetRow row, char separator) {
+        return quantity + separator + '"' + row.value() + '"' + separator + row.unit() + separator;
     }
 
     /**

@@ -21,9 +21,11 @@ record Run(int status, String out, String err) {
         ByteArrayOutputStream err = new ByteArrayOutputStream();
         int status = Main.run(
                 arguments,
-                new PrintStream(out, true, StandardCharsets.UTF_8),
-                new PrintStream(err, true, StandardCharsets.UTF_8),
-                false);
+                new Main.Console(
+                        new PrintStream(out, true, StandardCharsets.UTF_8),
+                        new PrintStream(err, true, StandardCharsets.UTF_8),
+                        false,
+                        false));
         return new Run(status, out.toString(StandardCharsets.UTF_8), err.toString(StandardCharsets.UTF_8));
     }
 
