@@ -59,7 +59,14 @@ public final class Check {
                     : Optional.of(band.get().envelopeWith(result.band().orElseThrow()));
         }
         List<Judgement> judgements = judge(band.map(TraceBand::judged).orElse(envelope));
-        return new ProfileResult(profile, points, envelope, band, judgements, leverages(points, judgements));
+        return new ProfileResult(
+                profile,
+                points,
+                envelope,
+                band,
+                judgements,
+                leverages(points, judgements),
+                FurtherLimit.of(profile, points));
     }
 
     private PointResult at(OperatingPoint point) {

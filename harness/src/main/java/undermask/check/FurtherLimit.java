@@ -2,6 +2,12 @@ package undermask.check;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.function.ToDoubleFunction;
+import undermask.cost.MotorHeat;
+import undermask.cost.MotorTerminals;
+import undermask.drive.Edges;
+import undermask.drive.OperatingPoint;
+import undermask.pwm.Bridge;
 import undermask.unit.Figures;
 import undermask.unit.Place;
 import undermask.unit.Range;
@@ -16,9 +22,10 @@ import undermask.unit.Range;
  * @param place the row of the profile to begin at
  */
 public record FurtherLimit(String quantity, double value, double limit, Range range, Place place) {
-    /** The limits that a profile's policy sets. */
-    public static List<FurtherLimit> of(Profile profile) {
+    /** The limits that a profile's policy sets, each held against the worst of its points. */
+    static List<FurtherLimit> of(Profile profile, List<PointResult> points) {
         List<FurtherLimit> limits = new ArrayList<>();
+        Place installation = profile.place("installation");
         profile.policy()
                 .leakageLimit()
                 .ifPresent(limit -> limits.add(new FurtherLimit(
@@ -26,8 +33,37 @@ public record FurtherLimit(String quantity, double value, double limit, Range ra
                         profile.installation().leakageCurrent(),
                         limit,
                         Policy.LEAKAGE_LIMIT,
-                        profile.place("installation"))));
+                        installation)));
+        profile.policy()
+                .windingLimit()
+                .ifPresent(limit -> limits.add(new FurtherLimit(
+                        "winding temperature",
+                        worst(
+                                points,
+                                bridge -> MotorHeat.of(profile.installation(), bridge)
+                                        .windingCelsius()),
+                        limit,
+                        Policy.WINDING_LIMIT,
+                        profile.place(OperatingPoint.CURRENT.quantity()))));
+        profile.policy()
+                .motorPeakLimit()
+                .ifPresent(limit -> limits.add(new FurtherLimit(
+                        "peak voltage at the motor",
+                        worst(
+                                points,
+                                bridge -> MotorTerminals.of(profile.installation(), bridge)
+                                        .peak()),
+                        limit,
+                        Policy.MOTOR_PEAK_LIMIT,
+                        profile.place(Edges.SLEW_RISING.quantity()))));
         return limits;
+    }
+
+    private static double worst(List<PointResult> points, ToDoubleFunction<Bridge> value) {
+        return points.stream()
+                .mapToDouble(point -> value.applyAsDouble(point.bridge()))
+                .max()
+                .orElseThrow();
     }
 
     /** Whether the profile stays within. */

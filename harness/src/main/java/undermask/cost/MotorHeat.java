@@ -2,6 +2,7 @@ package undermask.cost;
 
 import java.util.List;
 import undermask.installation.Installation;
+import undermask.installation.MotorCooling;
 import undermask.pwm.Bridge;
 import undermask.signal.EdgeTrain;
 import undermask.signal.Lines;
@@ -31,7 +32,6 @@ public record MotorHeat(
     /** Rise at rated load: class F built for the rise of class B (IEC 60034-1 table 8), K. */
     private static final double RATED_RISE = 80;
 
-    private static final double AMBIENT_CELSIUS = 40;
     /** Class F, °C. */
     public static final double CLASS_CELSIUS = 155;
     /** What a housing gives off without its fan, over what it does at rated speed (common practice). */
@@ -50,7 +50,8 @@ public record MotorHeat(
         double current =
                 bridge.point().loadCurrentRms() / installation.fitting().motors();
         double flux = bridge.fundamentalVoltage() / lineVoltage * BASE_HZ / output;
-        double speed = Math.min(1, output / BASE_HZ);
+        boolean forced = installation.motorPlace().cooling() == MotorCooling.FORCED;
+        double speed = forced ? 1 : Math.min(1, output / BASE_HZ);
         double loss = motor.copperLoss(current)
                 + motor.coreLoss() * flux * flux * Math.pow(output / BASE_HZ, 1.5)
                 + motor.mechanicalLoss() * Math.pow(output / BASE_HZ, 2)
@@ -58,7 +59,7 @@ public record MotorHeat(
                 + harmonic[0]
                 + harmonic[1];
         double cooling = STANDSTILL_COOLING + (1 - STANDSTILL_COOLING) * Math.pow(speed, 0.8);
-        double celsius = AMBIENT_CELSIUS + RATED_RISE * loss / motor.ratedLoss() / cooling;
+        double celsius = installation.motorPlace().ambientCelsius() + RATED_RISE * loss / motor.ratedLoss() / cooling;
         return new MotorHeat(
                 harmonic[0],
                 harmonic[1],

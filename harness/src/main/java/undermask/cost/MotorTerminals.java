@@ -4,6 +4,7 @@ import java.util.Optional;
 import undermask.installation.Installation;
 import undermask.installation.OutputFilter;
 import undermask.installation.OutputFilterKind;
+import undermask.pwm.Bridge;
 
 /**
  * The voltage between two motor terminals at the end of a lead: an edge that is over before its echo is back doubles.
@@ -23,6 +24,14 @@ public record MotorTerminals(double peak, double riseTime, double reflection, do
     private static final double[][] REFLECTION = {{3.7e3, 0.945}, {90e3, 0.82}, {355e3, 0.60}};
     /** Rise of an LC low-pass from tenth to nine tenths over the root of LC, stretched to the whole transition. */
     private static final double RISE_OF_LOW_PASS = 2.2;
+
+    /** Works it out for the fastest edge of a bridge; one that never switches gives its link voltage. */
+    public static MotorTerminals of(Installation installation, Bridge bridge) {
+        double fastest = bridge.fastestTransition();
+        return Double.isFinite(fastest)
+                ? of(installation, bridge.link().mean(), fastest)
+                : new MotorTerminals(bridge.link().mean(), 0, 0, 0);
+    }
 
     /**
      * Works it out.

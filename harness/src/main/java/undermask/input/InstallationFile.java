@@ -14,7 +14,9 @@ import undermask.installation.Installation;
 import undermask.installation.LeadFitting;
 import undermask.installation.Link;
 import undermask.installation.MainsLead;
+import undermask.installation.MotorCooling;
 import undermask.installation.MotorPart;
+import undermask.installation.MotorPlace;
 import undermask.installation.OutputFilter;
 import undermask.installation.OutputFilterKind;
 import undermask.installation.OwnElement;
@@ -130,7 +132,10 @@ final class InstallationFile {
                     rows.built(fitting),
                     rows.built(options),
                     rows.built(elements),
-                    deviations);
+                    deviations,
+                    new MotorPlace(
+                            rows.choice("motor cooling", MotorCooling.class, MotorCooling.SHAFT_FAN),
+                            rows.number(MotorPlace.AMBIENT, MotorPlace.RATED.ambientCelsius())));
             if (own) {
                 // a node that hangs in the air or a contradiction shows when it is solved
                 new PortResponse(installation, MainsNetwork.CISPR_9_KHZ, 0, Variation.NONE).commonMode(0, PROBE_HZ);

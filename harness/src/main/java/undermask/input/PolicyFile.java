@@ -1,7 +1,9 @@
 package undermask.input;
 
 import java.util.Optional;
+import java.util.OptionalDouble;
 import undermask.check.Policy;
+import undermask.unit.Range;
 
 /** Reads the quantities of a policy, from a file of their own or from a profile that overrides some of them. */
 final class PolicyFile {
@@ -34,9 +36,13 @@ final class PolicyFile {
                         rows.number(Policy.PERCENTILE, base.percentile()),
                         (int) rows.number(Policy.RUNS, base.toleranceRuns()),
                         (long) rows.number(Policy.SEED, base.seed()),
-                        rows.gives(Policy.LEAKAGE_LIMIT.quantity())
-                                ? rows.optional(Policy.LEAKAGE_LIMIT)
-                                : base.leakageLimit()));
+                        limit(rows, Policy.LEAKAGE_LIMIT, base.leakageLimit()),
+                        limit(rows, Policy.WINDING_LIMIT, base.windingLimit()),
+                        limit(rows, Policy.MOTOR_PEAK_LIMIT, base.motorPeakLimit())));
         return otherwise.isPresent() ? policy : Optional.empty();
+    }
+
+    private static OptionalDouble limit(QuantityTable rows, Range range, OptionalDouble otherwise) {
+        return rows.gives(range.quantity()) ? rows.optional(range) : otherwise;
     }
 }

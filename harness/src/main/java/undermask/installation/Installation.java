@@ -23,6 +23,7 @@ import undermask.unit.Range;
  * @param options what is fitted to or taken out of the drive
  * @param ownElements what somebody adds to the circuit
  * @param deviations relative standard deviations that differ from the usual ones
+ * @param motorPlace what cools the motor
  */
 public record Installation(
         String name,
@@ -39,7 +40,8 @@ public record Installation(
         LeadFitting fitting,
         DriveOptions options,
         List<OwnElement> ownElements,
-        Map<Parasitic, Double> deviations) {
+        Map<Parasitic, Double> deviations,
+        MotorPlace motorPlace) {
     public static final Range FILTER_EARTH_LEAD = new Range("filter earth lead length", Dimension.LENGTH, 0.005, 5);
     public static final Range HEATSINK = new Range("heatsink capacitance", Dimension.CAPACITANCE, 1e-12, 10e-9);
     public static final Range MOTOR_LEAD_LENGTH = new Range("motor lead length", Dimension.LENGTH, 0.1, 300);
@@ -59,6 +61,7 @@ public record Installation(
         Objects.requireNonNull(options);
         ownElements = List.copyOf(ownElements);
         deviations = Map.copyOf(deviations);
+        Objects.requireNonNull(motorPlace);
         FILTER_EARTH_LEAD.check(filterEarthLead);
         HEATSINK.check(heatsinkCapacitance);
         MOTOR_LEAD_LENGTH.check(motorLeadLength);
@@ -99,7 +102,8 @@ public record Installation(
                 LeadFitting.PLAIN,
                 DriveOptions.PLAIN,
                 List.of(),
-                Map.of());
+                Map.of(),
+                MotorPlace.RATED);
     }
 
     /** Relative standard deviation of a value, a share. */

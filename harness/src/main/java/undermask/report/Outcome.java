@@ -17,8 +17,14 @@ import undermask.receiver.Detector;
  * @param points label and judgements of each operating point
  * @param judgements worst frequency of each limited detector over all points
  * @param leverages what rules at each of these frequencies, in their order
+ * @param furtherLimits limits of the policy that are not about emission
  */
-public record Outcome(Profile profile, List<Point> points, List<Judgement> judgements, List<Leverage> leverages) {
+public record Outcome(
+        Profile profile,
+        List<Point> points,
+        List<Judgement> judgements,
+        List<Leverage> leverages,
+        List<FurtherLimit> furtherLimits) {
     /**
      * What is kept of an operating point.
      *
@@ -45,17 +51,13 @@ public record Outcome(Profile profile, List<Point> points, List<Judgement> judge
                                 point.judgements()))
                         .toList(),
                 result.judgements(),
-                result.leverages());
+                result.leverages(),
+                result.furtherLimits());
     }
 
     /** What rules at the frequency of a judgement. */
     Leverage leverage(Judgement judgement) {
         return leverages.get(judgements.indexOf(judgement));
-    }
-
-    /** Further limits of the policy and what the profile makes of them. */
-    public List<FurtherLimit> furtherLimits() {
-        return FurtherLimit.of(profile);
     }
 
     /** The judgement with the least left of what its policy asks for. */

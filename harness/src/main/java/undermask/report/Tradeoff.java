@@ -55,16 +55,9 @@ record Tradeoff(
                             .total());
             Sound sound = Sound.of(point.bridge());
             loudest = loudest == null || sound.level() > loudest.level() ? sound : loudest;
-            double fastest = point.bridge().fastestTransition();
-            if (Double.isFinite(fastest)) {
-                peak = Math.max(
-                        peak,
-                        MotorTerminals.of(
-                                        profile.installation(),
-                                        point.bridge().link().mean(),
-                                        fastest)
-                                .peak());
-            }
+            peak = Math.max(
+                    peak,
+                    MotorTerminals.of(profile.installation(), point.bridge()).peak());
         }
         boolean passes = outcome.passes() && celsius <= MotorHeat.CLASS_CELSIUS;
         return new Tradeoff(

@@ -66,14 +66,9 @@ public final class WaveformRun {
         return said;
     }
 
-    /** Peak by reflection; the fastest edge of the line-to-line voltage travels to the motor. */
+    /** Peak by reflection of the fastest edge. */
     private static String terminals(Profile profile, Bridge bridge) {
-        double fastest = bridge.fastestTransition();
-        if (Double.isInfinite(fastest)) {
-            return "no edge";
-        }
-        MotorTerminals terminals =
-                MotorTerminals.of(profile.installation(), bridge.link().mean(), fastest);
+        MotorTerminals terminals = MotorTerminals.of(profile.installation(), bridge);
         return volts(terminals.peak()) + " peak, rise " + Figures.withUnit(terminals.riseTime(), Dimension.TIME, 3)
                 + ", reflection " + Figures.fixed(terminals.reflection(), 2);
     }

@@ -33,6 +33,7 @@ import undermask.installation.Link;
 import undermask.installation.MainsLead;
 import undermask.installation.Material;
 import undermask.installation.MotorPart;
+import undermask.installation.MotorPlace;
 import undermask.installation.RingCores;
 import undermask.installation.ShieldTermination;
 import undermask.installation.Supply;
@@ -103,7 +104,8 @@ class FittedPartsCrossTest {
                         1),
                 DriveOptions.PLAIN,
                 List.of(),
-                Map.of());
+                Map.of(),
+                MotorPlace.RATED);
     }
 
     /** The same, written down element by element. */

@@ -172,6 +172,21 @@ class CheckCommandTest {
     }
 
     @Test
+    void aQuietProfileThatCooksTheMotorFails() throws IOException {
+        SmallPlant.write(
+                folder.resolve("profiles"),
+                "pump",
+                "filter-3ph-16a",
+                "winding temperature limit,60,degC,\nmotor peak voltage limit,800,V,");
+        Run run = Run.in(folder, "check", "--no-charts");
+        assertThat(run.status()).isOne();
+        assertThat(run.out())
+                .contains("1 clear")
+                .containsPattern("pump.csv:12:14: pump: winding temperature \\d+ degC, limit 60 degC")
+                .containsPattern("pump.csv:7:14: pump: peak voltage at the motor [0-9.]+ k?V, limit 800 V");
+    }
+
+    @Test
     void toleranceRunsAddPercentilesToTheEnvelope() throws IOException {
         SmallPlant.write(folder.resolve("profiles"), "pump", "filter-3ph-16a", "tolerance runs,10,,\npercentile,80,%,");
         Run run = Run.in(folder, "check", "--no-charts");

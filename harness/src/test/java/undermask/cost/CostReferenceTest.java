@@ -4,6 +4,9 @@ import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 import static org.assertj.core.api.Assertions.withinPercentage;
 
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
 import java.util.OptionalDouble;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
@@ -19,6 +22,17 @@ import undermask.drive.ModulationPlan;
 import undermask.drive.OperatingPoint;
 import undermask.drive.Switching;
 import undermask.drive.VoltageCurve;
+import undermask.installation.CablePart;
+import undermask.installation.Capacitor;
+import undermask.installation.DriveOptions;
+import undermask.installation.Installation;
+import undermask.installation.LeadFitting;
+import undermask.installation.Link;
+import undermask.installation.MainsLead;
+import undermask.installation.MotorCooling;
+import undermask.installation.MotorPart;
+import undermask.installation.MotorPlace;
+import undermask.installation.Supply;
 import undermask.pwm.Bridge;
 import undermask.pwm.LinkVoltage;
 import undermask.pwm.OutputLoad;
@@ -128,7 +142,49 @@ class CostReferenceTest {
         assertThat(Sound.of(slow).level() - Sound.of(fast).level()).isGreaterThan(6);
     }
 
+    // Source: common practice: a fan on the shaft stands still with it, 10 K halve the life, and a motor at its rated
+    // load
+    // on a good drive stays below its class.
+    @Test
+    void aSlowMotorNeedsAFanOfItsOwn() {
+        Bridge bridge = bridge(Modulation.SPACE_VECTOR, 0.9, 0.8, 4000, 10, 7.5);
+        MotorHeat own = MotorHeat.of(installation(MotorCooling.SHAFT_FAN), bridge);
+        MotorHeat forced = MotorHeat.of(installation(MotorCooling.FORCED), bridge);
+        assertThat(own.windingCelsius()).isGreaterThan(forced.windingCelsius() + 30);
+        assertThat(forced.lifeFactor() / own.lifeFactor())
+                .isCloseTo(Math.pow(2, (own.windingCelsius() - forced.windingCelsius()) / 10), within(1e-6));
+        Bridge rated = bridge(Modulation.SPACE_VECTOR, 1.1, 0.82, 4000, 50, 7.95);
+        MotorHeat heat = MotorHeat.of(installation(MotorCooling.SHAFT_FAN), rated);
+        assertThat(heat.windingCelsius()).isBetween(110.0, MotorHeat.CLASS_CELSIUS);
+        assertThat(heat.loss() / heat.ratedLoss()).isBetween(1.0, 1.25);
+    }
+
+    private static Installation installation(MotorCooling cooling) {
+        return new Installation(
+                "plant",
+                new Supply(3, 400, 50),
+                new MainsLead(2, 0.7e-6, 0.8e-6),
+                Optional.empty(),
+                0.1,
+                new Link(new Capacitor(500e-6, 0.1, 40e-9), new Capacitor(0, 0, 0)),
+                100e-12,
+                new CablePart("lead", 400e-12, 110e-9, 0.04, 1e6, 0.02, true, "test"),
+                10,
+                new MotorPart("motor", 4000, 3e-10, 3e-9, 1e-3, 800, 5, 22e-3, "test"),
+                OptionalDouble.empty(),
+                LeadFitting.PLAIN,
+                DriveOptions.PLAIN,
+                List.of(),
+                Map.of(),
+                new MotorPlace(cooling, 40));
+    }
+
     private static Bridge bridge(Modulation scheme, double index, double powerFactor, double carrier) {
+        return bridge(scheme, index, powerFactor, carrier, 50, 10);
+    }
+
+    private static Bridge bridge(
+            Modulation scheme, double index, double powerFactor, double carrier, double output, double amperes) {
         DriveSettings settings = new DriveSettings(
                 Carrier.fixed(carrier, CarrierSampling.TWICE),
                 ModulationPlan.of(scheme),
@@ -137,6 +193,9 @@ class CostReferenceTest {
                 new VoltageCurve(index * LINK / 2 * Math.sqrt(1.5), 50, 0),
                 OptionalDouble.of(LINK));
         return Bridge.switching(
-                settings, new OperatingPoint(50, 10, powerFactor), LinkVoltage.constant(LINK), OutputLoad.IDEAL);
+                settings,
+                new OperatingPoint(output, amperes, powerFactor),
+                LinkVoltage.constant(LINK),
+                OutputLoad.IDEAL);
     }
 }

@@ -18,6 +18,7 @@ import undermask.installation.LeadFitting;
 import undermask.installation.Link;
 import undermask.installation.MainsLead;
 import undermask.installation.MotorPart;
+import undermask.installation.MotorPlace;
 import undermask.installation.OutputFilter;
 import undermask.installation.OutputFilterKind;
 import undermask.installation.Supply;
@@ -39,7 +40,8 @@ class MotorTerminalsReferenceTest {
                 LeadFitting.PLAIN,
                 new DriveOptions(true, 0, 0, output),
                 List.of(),
-                Map.of());
+                Map.of(),
+                MotorPlace.RATED);
     }
 
     // Source: critical lengths v·t_r/2 with about 150 m/µs: 0.1 µs 7.5 m, 0.2 µs 15 m, 1 µs 75 m; Persson (1992), from
