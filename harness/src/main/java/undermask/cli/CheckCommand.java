@@ -57,7 +57,7 @@ final class CheckCommand implements Callable<Integer> {
         List<Profile> read = profiles.isEmpty() ? folder.readAll() : folder.read(profiles);
         int workers = jobs == null ? Runtime.getRuntime().availableProcessors() : jobs;
         List<Outcome> outcomes = new CheckRun(
-                        new ReportFolder(output.reports), workers, !output.noCharts, console.err()::println)
+                        folder, new ReportFolder(output.reports), workers, !output.noCharts, console.err()::println)
                 .of(read);
         if (!output.quiet) {
             console.out().print(new Summary(outcomes).console(console.colour()));

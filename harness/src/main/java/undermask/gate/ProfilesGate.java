@@ -29,14 +29,16 @@ public final class ProfilesGate {
     Stream<DynamicTest> profiles() throws IOException {
         Path profiles = Path.of(System.getProperty("undermask.profiles", "."));
         Path reports = Path.of(System.getProperty("undermask.reports", "reports"));
+        ProfileFolder folder = new ProfileFolder(profiles);
         List<Outcome> outcomes;
         try {
             outcomes = new CheckRun(
+                            folder,
                             new ReportFolder(reports),
                             Runtime.getRuntime().availableProcessors(),
                             true,
                             System.err::println)
-                    .of(new ProfileFolder(profiles).readAll());
+                    .of(folder.readAll());
         } catch (Refused e) {
             return Stream.of(DynamicTest.dynamicTest("profiles can be read", () -> {
                 throw failure("refused, no profile was checked:\n" + e.getMessage());
@@ -62,7 +64,7 @@ public final class ProfilesGate {
             Finding finding = new Finding(outcome, judgement);
             return DynamicTest.dynamicTest(finding.title(), () -> {
                 if (!outcome.passes(judgement)) {
-                    throw failure(finding.text());
+                    throw failure(finding.text() + "\n" + String.join("\n", outcome.advice()));
                 }
             });
         });

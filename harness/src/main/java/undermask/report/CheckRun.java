@@ -12,12 +12,14 @@ import undermask.check.Check;
 import undermask.check.PointResult;
 import undermask.check.Profile;
 import undermask.check.ProfileResult;
+import undermask.input.ProfileFolder;
 
 /**
  * Checks profiles side by side and writes their reports. A profile's own reports are written as soon as it is done, and
  * only its judgements are kept.
  */
 public final class CheckRun {
+    private final ProfileFolder source;
     private final ReportFolder folder;
     private final int jobs;
     private final ChartMaker charts;
@@ -25,11 +27,13 @@ public final class CheckRun {
     /**
      * Prepares a run.
      *
+     * @param source where the profiles are read from; advice on failing ones reads them anew
      * @param jobs profiles checked at a time, at least 1
      * @param charts whether charts are drawn
      * @param warnings receives what went wrong without touching a verdict
      */
-    public CheckRun(ReportFolder folder, int jobs, boolean charts, Consumer<String> warnings) {
+    public CheckRun(ProfileFolder source, ReportFolder folder, int jobs, boolean charts, Consumer<String> warnings) {
+        this.source = source;
         if (jobs < 1) {
             throw new IllegalArgumentException("jobs is " + jobs + "; allowed: at least 1");
         }
@@ -78,7 +82,8 @@ public final class CheckRun {
 
     private Outcome one(Profile profile) throws IOException {
         ProfileResult result = Check.of(profile);
-        Outcome outcome = Outcome.of(result);
+        Outcome judged = Outcome.of(result);
+        Outcome outcome = judged.passes() ? judged : judged.with(Advice.of(source, result));
         folder.write(profile.name(), "envelope.csv", EnvelopeCsv.of(result.envelope(), result.band(), profile.mask()));
         charts.draw(
                 folder,

@@ -18,13 +18,15 @@ import undermask.receiver.Detector;
  * @param judgements worst frequency of each limited detector over all points
  * @param leverages what rules at each of these frequencies, in their order
  * @param furtherLimits limits of the policy that are not about emission
+ * @param advice what single changes would do, a line each; empty for a profile that passes
  */
 public record Outcome(
         Profile profile,
         List<Point> points,
         List<Judgement> judgements,
         List<Leverage> leverages,
-        List<FurtherLimit> furtherLimits) {
+        List<FurtherLimit> furtherLimits,
+        List<String> advice) {
     /**
      * What is kept of an operating point.
      *
@@ -52,7 +54,13 @@ public record Outcome(
                         .toList(),
                 result.judgements(),
                 result.leverages(),
-                result.furtherLimits());
+                result.furtherLimits(),
+                List.of());
+    }
+
+    /** The same with advice. */
+    Outcome with(List<String> lines) {
+        return new Outcome(profile, points, judgements, leverages, furtherLimits, lines);
     }
 
     /** What rules at the frequency of a judgement. */

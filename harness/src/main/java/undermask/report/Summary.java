@@ -119,6 +119,9 @@ public final class Summary {
                     .filter(judgement -> !outcome.passes(judgement))
                     .map(judgement -> new Finding(outcome, judgement).text())
                     .forEach(finding -> text.append('\n').append(finding).append('\n'));
+            if (!outcome.advice().isEmpty()) {
+                text.append('\n').append(String.join("\n", outcome.advice())).append('\n');
+            }
             outcome.furtherLimits().stream()
                     .filter(limit -> !limit.kept())
                     .forEach(limit -> text.append('\n')

@@ -210,9 +210,11 @@ public final class SweepRun {
         StringBuilder said = new StringBuilder();
         Paragraph.append(
                 said,
-                best.map(taken -> "take " + setting(quantities, taken) + ": of " + passing
-                                + " settings that pass it adds"
-                                + " the least heat, " + Figures.fixed(taken.driveLoss(), 0) + " W in the drive and "
+                best.map(taken -> "take " + setting(quantities, taken)
+                                + (passing == 1
+                                        ? ": the only setting that passes, "
+                                        : ": of " + passing + " settings that pass it adds the least heat, ")
+                                + Figures.fixed(taken.driveLoss(), 0) + " W in the drive and "
                                 + Figures.fixed(taken.harmonicLoss(), 1) + " W of harmonics in the motor, with "
                                 + Figures.fixed(taken.marginDb(), 1) + " dB margin")
                         .orElse("no setting passes; the nearest is "

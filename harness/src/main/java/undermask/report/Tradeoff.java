@@ -59,9 +59,22 @@ record Tradeoff(
                     peak,
                     MotorTerminals.of(profile.installation(), point.bridge()).peak());
         }
-        boolean passes = outcome.passes() && celsius <= MotorHeat.CLASS_CELSIUS;
         return new Tradeoff(
-                values, worst.marginDb(), passes, celsius, harmonic, drive, loudest.level(), loudest.toneHz(), peak);
+                values,
+                worst.marginDb(),
+                outcome.passes(),
+                celsius,
+                harmonic,
+                drive,
+                loudest.level(),
+                loudest.toneHz(),
+                peak);
+    }
+
+    /** The same with another word on whether it passes. */
+    Tradeoff passing(boolean really) {
+        return new Tradeoff(
+                values, marginDb, really, windingCelsius, harmonicLoss, driveLoss, sound, toneHz, motorPeak);
     }
 
     /** Whether another setting is at least as good in everything and better in something. */

@@ -64,6 +64,35 @@ class CheckCommandTest {
                 .allSatisfy(line -> assertThat(line.length()).isLessThanOrEqualTo(80));
     }
 
+    // each line of advice is a check of its own: the same change, saved as a profile, gains the same
+    @Test
+    void adviceIsComputed() throws IOException {
+        Path profiles = folder.resolve("profiles");
+        SmallPlant.write(profiles, "bare", "none", "");
+        Run run = Run.in(folder, "check", "--no-charts");
+        assertThat(run.out())
+                .contains("what single changes would do at the worst point, each checked:")
+                .contains("filter-3ph-8a ");
+        double before = margin("bare");
+        java.util.regex.Matcher line = java.util.regex.Pattern.compile("carrier 2 kHz +\\+([0-9.]+) dB")
+                .matcher(run.out());
+        assertThat(line.find()).isTrue();
+        Files.writeString(
+                profiles.resolve("bare.csv"),
+                Files.readString(profiles.resolve("bare.csv")).replace("carrier frequency,4,", "carrier frequency,2,"));
+        Run.in(folder, "check", "--no-charts");
+        assertThat(margin("bare") - before)
+                .isCloseTo(Double.parseDouble(line.group(1)), org.assertj.core.api.Assertions.within(0.06));
+    }
+
+    private double margin(String profile) throws IOException {
+        return Files.readAllLines(folder.resolve("reports/summary.csv")).stream()
+                .filter(row -> row.startsWith(profile + ",all,"))
+                .mapToDouble(row -> Double.parseDouble(row.split(",")[7]))
+                .min()
+                .orElseThrow();
+    }
+
     @Test
     void tightFailsUnlessThePolicyLetsItPass() throws IOException {
         SmallPlant.write(folder.resolve("profiles"), "pump", "filter-3ph-16a", "required margin,30,dB,");
