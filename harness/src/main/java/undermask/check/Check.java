@@ -32,7 +32,7 @@ public final class Check {
         this.network =
                 InstallationNetwork.of(profile.installation(), profile.mask().network(), profile.peakCurrent());
         this.tolerances = profile.policy().toleranceRuns() > 0
-                ? Optional.of(new ToleranceRuns(profile.installation(), network, profile.policy()))
+                ? Optional.of(new ToleranceRuns(profile.installation(), network, receiver, profile.policy()))
                 : Optional.empty();
     }
 

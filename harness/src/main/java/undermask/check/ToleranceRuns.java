@@ -10,6 +10,7 @@ import undermask.network.InstallationNetwork;
 import undermask.network.PortResponse;
 import undermask.network.Variation;
 import undermask.receiver.Detector;
+import undermask.receiver.Receiver;
 
 /**
  * Draws an installation's values anew, each log-normal about what is written, and keeps by which complex factor the
@@ -18,8 +19,6 @@ import undermask.receiver.Detector;
  */
 final class ToleranceRuns {
     private static final int POINTS = 320;
-    private static final double LOWEST_HZ = 9e3;
-    private static final double HIGHEST_HZ = 29.9e6;
 
     private final double[] frequencies = new double[POINTS];
     /** Factors of run, port and frequency: common mode and link current, real and imaginary part each. */
@@ -27,9 +26,13 @@ final class ToleranceRuns {
 
     private final int ports;
 
-    ToleranceRuns(Installation installation, InstallationNetwork network, Policy policy) {
+    /** Draws the runs of a policy, on a grid over what the receiver can be tuned to. */
+    ToleranceRuns(Installation installation, InstallationNetwork network, Receiver receiver, Policy policy) {
+        double low = receiver.lowest();
+        double high = receiver.highest();
         for (int i = 0; i < POINTS; i++) {
-            frequencies[i] = LOWEST_HZ * Math.pow(HIGHEST_HZ / LOWEST_HZ, i / (POINTS - 1.0));
+            // rounding must not leave the receiver's bands
+            frequencies[i] = Math.max(low, Math.min(high, low * Math.pow(high / low, i / (POINTS - 1.0))));
         }
         ports = network.ports().size();
         float[][][] nominal = solve(network.response(Variation.NONE));
@@ -127,7 +130,8 @@ final class ToleranceRuns {
 
     /** A value of the grid at a frequency, straight over the logarithm of frequency. */
     double at(double[] row, double frequency) {
-        double place = Math.log(frequency / LOWEST_HZ) / Math.log(HIGHEST_HZ / LOWEST_HZ) * (POINTS - 1);
+        double low = frequencies[0];
+        double place = Math.log(frequency / low) / Math.log(frequencies[POINTS - 1] / low) * (POINTS - 1);
         int below = Math.max(0, Math.min(POINTS - 2, (int) Math.floor(place)));
         double share = Math.max(0, Math.min(1, place - below));
         return row[below] + share * (row[below + 1] - row[below]);

@@ -31,6 +31,16 @@ public final class Receiver {
         return new Receiver(standard.bands());
     }
 
+    /** The lowest frequency that it can be tuned to, Hz. */
+    public double lowest() {
+        return bands.get(0).from();
+    }
+
+    /** The highest frequency that it can be tuned to, Hz. */
+    public double highest() {
+        return bands.get(bands.size() - 1).to();
+    }
+
     /** The 6 dB bandwidth that a frequency is read with, Hz. */
     public double bandwidth(double frequency) {
         return bandOf(frequency).response().bandwidth();

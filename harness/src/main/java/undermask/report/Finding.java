@@ -93,6 +93,9 @@ public final class Finding {
         if (profile().installation().filter().isEmpty()) {
             return "fit a mains filter, its case flat on the mounting plate";
         }
+        if (!outcome.leverage(judgement).commonModeRules()) {
+            return "try a lower carrier, a larger X capacitor or a line reactor";
+        }
         return judgement.frequencyHz() < LEAD_RESONANCES_FROM
                 ? "try a lower carrier, a shorter motor lead or a larger choke"
                 : "try a lower dv/dt or a shorter earth lead of the mains filter";

@@ -4,6 +4,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
 import java.io.IOException;
+import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
 import org.junit.jupiter.api.BeforeEach;
@@ -118,6 +119,23 @@ class ToleranceRunsCrossTest {
                 .get(0)
                 .marginDb();
         assertThat(most).isLessThan(half);
+    }
+
+    // a receiver of MIL-STD-461 begins at 10 kHz and has no quasi-peak detector
+    @Test
+    void runsStayWithinTheReceiverOfTheMask() throws IOException, Refused {
+        SmallPlant.write(folder, "pump", "filter-3ph-16a", "tolerance runs,10,,");
+        Path pump = folder.resolve("pump.csv");
+        Files.writeString(pump, Files.readString(pump).replace("iec61800-3-c2", "ce102-440v"));
+        ProfileResult result =
+                Check.of(new ProfileFolder(folder).read(List.of("pump")).get(0));
+        TraceBand band = result.band().orElseThrow();
+        assertThat(band.high().frequency(0)).isEqualTo(10e3);
+        for (int step = 0; step < band.low().size(); step++) {
+            assertThat(band.low().levelDbuv(Detector.PEAK, step))
+                    .isLessThanOrEqualTo(band.high().levelDbuv(Detector.PEAK, step));
+            assertThat(band.low().levelDbuv(Detector.QUASI_PEAK, step)).isNaN();
+        }
     }
 
     @Test

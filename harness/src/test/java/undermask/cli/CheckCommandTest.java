@@ -64,6 +64,17 @@ class CheckCommandTest {
                 .allSatisfy(line -> assertThat(line.length()).isLessThanOrEqualTo(80));
     }
 
+    // an X capacitor works between lines and a motor lead to earth: the next step follows the mode that rules
+    @Test
+    void theNextStepFollowsTheModeThatRules() throws IOException {
+        Path profiles = folder.resolve("profiles");
+        SmallPlant.write(profiles, "pump", "filter-3ph-16a", "required margin,40,dB,");
+        Path pump = profiles.resolve("pump.csv");
+        Files.writeString(pump, Files.readString(pump).replace("iec61800-3-c2", "ce102-115v"));
+        String out = Run.in(folder, "check", "--no-charts").out();
+        assertThat(out).contains("differential mode rules").contains("next: try a lower carrier, a larger X capacitor");
+    }
+
     // each line of advice is a check of its own: the same change, saved as a profile, gains the same
     @Test
     void adviceIsComputed() throws IOException {
